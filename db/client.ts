@@ -1,0 +1,56 @@
+import { mkdirSync } from 'node:fs';
+import path from 'node:path';
+import type { PgDatabase, PgQueryResultHKT } from 'drizzle-orm/pg-core';
+import * as schema from './schema';
+
+export type Database = PgDatabase<PgQueryResultHKT, typeof schema>;
+export type Transaction = Parameters<Parameters<Database['transaction']>[0]>[0];
+/** Reads take either; writes only ever get a transaction. */
+export type Reader = Database | Transaction;
+
+export interface Store {
+  db: Database;
+  kind: 'pglite' | 'postgres';
+  close(): Promise<void>;
+}
+
+export type StoreOptions =
+  | { kind: 'folder'; dataDir: string }
+  | { kind: 'memory' }
+  | { kind: 'dump'; dump: Blob }
+  | { kind: 'postgres'; url: string };
+
+const MIGRATIONS = path.join(import.meta.dirname, 'migrations');
+
+/** Opens the store and brings it to the newest schema. */
+export async function openStore(options: StoreOptions): Promise<Store> {
+  return options.kind === 'postgres' ? openPostgres(options.url) : openPglite(options);
+}
+
+async function openPostgres(url: string): Promise<Store> {
+  const [{ default: pg }, { drizzle }, { migrate }] = await Promise.all([
+    import('pg'),
+    import('drizzle-orm/node-postgres'),
+    import('drizzle-orm/node-postgres/migrator'),
+  ]);
+  const pool = new pg.Pool({ connectionString: url, max: 10 });
+  const db = drizzle({ client: pool, schema });
+  await migrate(db, { migrationsFolder: MIGRATIONS });
+  return { db, kind: 'postgres', close: () => pool.end() };
+}
+
+async function openPglite(options: Exclude<StoreOptions, { kind: 'postgres' }>): Promise<Store> {
+  const [{ PGlite }, { drizzle }, { migrate }] = await Promise.all([
+    import('@electric-sql/pglite'),
+    import('drizzle-orm/pglite'),
+    import('drizzle-orm/pglite/migrator'),
+  ]);
+  if (options.kind === 'folder') mkdirSync(options.dataDir, { recursive: true });
+  const client =
+    options.kind === 'folder'
+      ? await PGlite.create(options.dataDir)
+      : await PGlite.create(options.kind === 'dump' ? { loadDataDir: options.dump } : {});
+  const db = drizzle({ client, schema });
+  if (options.kind !== 'dump') await migrate(db, { migrationsFolder: MIGRATIONS });
+  return { db, kind: 'pglite', close: () => client.close() };
+}
