@@ -20,7 +20,7 @@ const config: Config = {
     fontFamily: {
       code: ['var(--font-barlow)', 'sans-serif'],
       text: ['var(--font-hyperlegible)', 'sans-serif'],
-      reading: [['var(--font-hyperlegible-mono)', 'monospace'], { fontFeatureSettings: '"tnum"' }],
+      reading: ['var(--font-hyperlegible-mono)', 'monospace'],
     },
     extend: {
       screens: { xs: '22.5rem' },

@@ -72,11 +72,11 @@ export function Corridor({
                 </div>
                 <Figures row={row} size={size} />
               </div>
-              {!layout.sharedLimits && <CorridorAxis limits={rowLayout.limits} />}
+              {!layout.sharedLimits && <CorridorAxis limits={rowLayout.limits} hasZero={false} />}
             </Fragment>
           );
         })}
-        {layout.sharedLimits && first && <CorridorAxis limits={first.limits} />}
+        {layout.sharedLimits && first && <CorridorAxis limits={first.limits} hasZero />}
       </div>
       <p id={`${id}words`} className="sr-only">
         {corridorDescription(rows, basis)}
@@ -118,12 +118,12 @@ function Name({ row, size }: { row: CorridorRow; size: CorridorSize }) {
           {row.unitLabel}
         </span>
       </span>
-      {row.excluded && <span className="text-fore-quiet text-[0.8rem]">not counted</span>}
     </div>
   );
 }
 
 function Figures({ row, size }: { row: CorridorRow; size: CorridorSize }) {
+  const words = row.excluded ? 'not counted' : row.words;
   return (
     <div className="corridor-cell corridor-figures">
       {row.mean !== null && (
@@ -131,14 +131,14 @@ function Figures({ row, size }: { row: CorridorRow; size: CorridorSize }) {
           {signedPercent(row.mean, 1)}
         </span>
       )}
-      {row.words && (
+      {words && (
         <span
           className={clsx(
             'text-fore-quiet',
-            size === 'roomy' ? 'text-base' : 'max-w-22 text-[0.85rem]',
+            size === 'roomy' ? 'text-base' : 'max-w-19 text-[0.8rem] text-balance',
           )}
         >
-          {row.words}
+          {words}
         </span>
       )}
     </div>

@@ -31,7 +31,7 @@ export function Tag({ code, line, size = 'card', hangs = false, capHeight, class
       <div className="tag-paper ground-manila">
         <span className="tag-ring" aria-hidden="true" />
         <span className="tag-code font-code font-bold">{code}</span>
-        {line !== undefined && <span className="text-fore-quiet">{line}</span>}
+        {line !== undefined && <span className="tag-line text-fore-quiet">{line}</span>}
       </div>
       {hangs && <span className="tag-peg" aria-hidden="true" />}
     </div>

@@ -33,7 +33,7 @@ export function Row({ current, className, ...rest }: { current?: boolean } & Com
       aria-current={current || undefined}
       className={clsx(
         'border-line border-b align-top',
-        current && 'shadow-[inset_6px_0_0_var(--fore)]',
+        current && 'shadow-[inset_6px_0_0_var(--fore)] *:first:pl-4',
         className,
       )}
     />

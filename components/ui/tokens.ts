@@ -9,6 +9,8 @@ export const colours = {
   'wall-text': '#f3eddc',
   'wall-quiet': '#b3b8aa',
   chalk: '#faf6ec',
+  /** Grounds of inputs and keys, and marks inside verdict shapes. */
+  white: '#ffffff',
   rule: '#d8ccae',
   /** Edges of inputs and empty dots: at least 3:1 on chalk and on manila, unlike `rule`. */
   edge: '#7a6f55',

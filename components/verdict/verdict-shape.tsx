@@ -6,13 +6,13 @@ const shapes: Record<VerdictName, ReactNode> = {
   within: (
     <>
       <circle cx="24" cy="24" r="22" fill={colours.within} />
-      <path d="m13 25 8 8 14.5-17" fill="none" stroke="#fff" strokeWidth="5.5" />
+      <path d="m13 25 8 8 14.5-17" fill="none" stroke={colours.white} strokeWidth="5.5" />
     </>
   ),
   outside: (
     <>
       <path d="M24 1 47 24 24 47 1 24z" fill={colours.outside} />
-      <path d="M24 11.5v15.5m0 4v5.5" fill="none" stroke="#fff" strokeWidth="5.5" />
+      <path d="M24 11.5v15.5m0 4v5.5" fill="none" stroke={colours.white} strokeWidth="5.5" />
     </>
   ),
   'too-close': (
