@@ -128,6 +128,8 @@ export interface CheckView {
   pulls: PullView[];
   points: CorridorPoint[];
   progress: Progress;
+  /** 'Reading 9 of 15' */
+  progressWords: string;
   missing: string[];
   notFollowed: string[];
   notes: { text: string; at: string }[];
@@ -237,6 +239,8 @@ export interface ServerToClient {
   'bench:changed': (snapshot: BenchSnapshot) => void;
   'check:changed': (snapshot: CheckSnapshot) => void;
   'desk:changed': (snapshot: DeskSnapshot) => void;
+  /** Something at the bench that is no change of it: a line that could not be read, a value refused. */
+  'bench:noticed': (notice: { at: string; words: string }) => void;
   /** Every few seconds, so that a screen knows that it still hears us. */
   'post:heard': (at: string) => void;
 }

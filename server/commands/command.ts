@@ -49,6 +49,8 @@ export interface Command<Schema extends z.ZodType, Result> {
   (ctx: CommandContext, id: string, input: z.input<Schema>): Promise<Result>;
   readonly commandName: Permission;
   readonly input: Schema;
+  /** The same for an input that nobody has looked at yet; it is parsed like any other. */
+  readonly fromWire: (ctx: CommandContext, id: string, input: unknown) => Promise<Result>;
 }
 
 const hashOf = (input: unknown): string =>
@@ -138,7 +140,7 @@ export function defineCommand<Schema extends z.ZodType, Result>(
     return result;
   }
 
-  const command = async (ctx: CommandContext, id: string, raw: z.input<Schema>): Promise<Result> => {
+  const fromWire = async (ctx: CommandContext, id: string, raw: unknown): Promise<Result> => {
     if (!z.uuid().safeParse(id).success) throw new Problem('invalid', 'A command needs a UUID of its own.');
     try {
       return await attempt(ctx, id, raw);
@@ -152,5 +154,6 @@ export function defineCommand<Schema extends z.ZodType, Result>(
       });
     }
   };
-  return Object.assign(command, { commandName: spec.name, input: spec.input });
+  const command = (ctx: CommandContext, id: string, input: z.input<Schema>) => fromWire(ctx, id, input);
+  return Object.assign(command, { commandName: spec.name, input: spec.input, fromWire });
 }

@@ -5,9 +5,11 @@ import {
   certificates,
   checkNotes,
   checks,
+  meets,
   pullDecisions,
   pulls,
   tags,
+  testerProofs,
   testers,
   tools,
 } from '@/db/schema';
@@ -19,6 +21,8 @@ export interface CheckFile {
   tool: typeof tools.$inferSelect;
   tester: typeof testers.$inferSelect;
   certificate: typeof certificates.$inferSelect | null;
+  proof: typeof testerProofs.$inferSelect | null;
+  meet: Pick<typeof meets.$inferSelect, 'timeZone' | 'dayStartHour'>;
   benchNumber: number;
   pulls: PullFile[];
   notes: { text: string; at: Date }[];
@@ -55,6 +59,8 @@ export async function loadCheckFile(
       tool: tools,
       tester: testers,
       certificate: certificates,
+      proof: testerProofs,
+      meet: { timeZone: meets.timeZone, dayStartHour: meets.dayStartHour },
       benchNumber: benches.number,
     })
     .from(checks)
@@ -62,7 +68,9 @@ export async function loadCheckFile(
     .innerJoin(tools, eq(tools.id, tags.toolId))
     .innerJoin(testers, eq(testers.id, checks.testerId))
     .innerJoin(benches, eq(benches.id, checks.benchId))
+    .innerJoin(meets, eq(meets.id, checks.meetId))
     .leftJoin(certificates, eq(certificates.id, checks.certificateId))
+    .leftJoin(testerProofs, eq(testerProofs.id, checks.proofId))
     .where(
       'checkId' in which
         ? eq(checks.id, which.checkId)
@@ -82,14 +90,19 @@ export async function loadCheckFile(
     .from(checkNotes)
     .where(eq(checkNotes.checkId, head.check.id))
     .orderBy(desc(checkNotes.at));
-  return { ...head, pulls: gather(rows), notes };
+  return { ...head, pulls: gatherPulls(rows), notes };
 }
 
-function gather(
-  rows: { pull: typeof pulls.$inferSelect; decision: typeof pullDecisions.$inferSelect | null }[],
+/** Pulls in their order, each with its decisions, from rows of the two joined. */
+export function gatherPulls(
+  rows: {
+    pull: typeof pulls.$inferSelect | null;
+    decision: typeof pullDecisions.$inferSelect | null;
+  }[],
 ): PullFile[] {
   const byId = new Map<string, PullFile>();
   for (const { pull, decision } of rows) {
+    if (!pull) continue;
     const file = byId.get(pull.id) ?? { pull, accepted: null, voided: null };
     if (decision) file[decision.decision] = decision;
     byId.set(pull.id, file);

@@ -1,0 +1,43 @@
+import { EventEmitter } from 'node:events';
+import { createServer, type IncomingMessage, type Server, type ServerResponse } from 'node:http';
+import type { Duplex } from 'node:stream';
+import next from 'next';
+
+export interface WebServer {
+  http: Server;
+  /** Builds or loads the application; after this, requests are answered. */
+  prepare(): Promise<void>;
+  close(): Promise<void>;
+}
+
+/**
+ * Next and the live channel on one port. Next adds an `upgrade` listener to the server that it is
+ * given; it gets an emitter of its own, and only what is not the live channel's.
+ */
+export function createWebServer({ dev, dir }: { dev: boolean; dir: string }): WebServer {
+  const upgrades = new EventEmitter();
+  const app = next({ dev, dir, httpServer: upgrades as Server });
+  let handle: ((req: IncomingMessage, res: ServerResponse) => Promise<void>) | null = null;
+
+  const http = createServer((req, res) => {
+    if (handle) void handle(req, res);
+    else res.writeHead(503, { 'Retry-After': '5' }).end('Starting. Try again in a moment.');
+  });
+  http.on('upgrade', (req: IncomingMessage, socket: Duplex, head: Buffer) => {
+    if (req.url?.startsWith('/socket.io/')) return;
+    if (!upgrades.emit('upgrade', req, socket, head)) socket.destroy();
+  });
+
+  return {
+    http,
+    async prepare() {
+      await app.prepare();
+      handle = app.getRequestHandler();
+    },
+    async close() {
+      http.closeAllConnections();
+      await new Promise<void>((resolve) => http.close(() => resolve()));
+      await app.close();
+    },
+  };
+}
