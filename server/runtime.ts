@@ -3,7 +3,7 @@ import type { Store } from '@/db/client';
 import type { Actor } from '@/server/access/actor';
 import type { CommandContext } from '@/server/commands/command';
 import type { Env } from '@/server/env';
-import type { InstrumentManager } from '@/server/instruments/manager';
+import type { BoundInstruments } from '@/server/instruments/bind';
 import type { LiveHub } from '@/server/live/hub';
 
 /** What the process has opened. One for each process, made by the server file alone. */
@@ -16,7 +16,7 @@ export interface Runtime {
   clock: () => Date;
   logger: Logger;
   hub: LiveHub;
-  instruments: InstrumentManager;
+  instruments: BoundInstruments;
   /** The one-time code of an empty post; null once it has an owner. */
   setupCode: string | null;
 }
