@@ -14,9 +14,12 @@ export interface ToolWords {
 }
 
 /** '60–340 N·m', or the one value of a preset tool. */
-export function rangeWords(tool: Pick<ToolWords, 'toolClass' | 'rangeMin' | 'rangeMax' | 'unit' | 'nominal'>): string {
+export function rangeWords(
+  tool: Pick<ToolWords, 'toolClass' | 'rangeMin' | 'rangeMax' | 'unit' | 'nominal'>,
+): string {
   const unit = unitText(tool.unit);
-  if (isFixedTool(tool.toolClass) && tool.nominal !== null) return `preset to ${formatNumber(tool.nominal)} ${unit}`;
+  if (isFixedTool(tool.toolClass) && tool.nominal !== null)
+    return `preset to ${formatNumber(tool.nominal)} ${unit}`;
   return `${formatNumber(tool.rangeMin)}–${formatNumber(tool.rangeMax)} ${unit}`;
 }
 
@@ -32,11 +35,14 @@ export function claimWords(claim: Claim | null): string | null {
 
 /** 'Click wrench, ½ in drive' */
 export const toolWords = (tool: Pick<ToolWords, 'toolClass' | 'drive'>): string =>
-  tool.drive ? `${toolKindWords(tool.toolClass)}, ${tool.drive} drive` : toolKindWords(tool.toolClass);
+  tool.drive
+    ? `${toolKindWords(tool.toolClass)}, ${tool.drive} drive`
+    : toolKindWords(tool.toolClass);
 
 /** '60–340 N·m · claims ±4 %' */
 export const plateWords = (tool: ToolWords): string =>
   [rangeWords(tool), claimWords(tool.claim)].filter((part) => part !== null).join(' · ');
 
 /** The quiet line on a tag: 'Click wrench · 60–340 N·m' */
-export const tagLine = (tool: ToolWords): string => `${toolKindWords(tool.toolClass)} · ${rangeWords(tool)}`;
+export const tagLine = (tool: ToolWords): string =>
+  `${toolKindWords(tool.toolClass)} · ${rangeWords(tool)}`;

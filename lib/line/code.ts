@@ -22,5 +22,7 @@ export function parseTagCode(text: string): string | null {
   if (!match) return null;
   const letter = match[1]!.toUpperCase();
   const number = Number(match[2]);
-  return TAG_LETTERS.includes(letter) && number >= 1 ? `${letter}${String(number).padStart(2, '0')}` : null;
+  return TAG_LETTERS.includes(letter) && number >= 1
+    ? `${letter}${String(number).padStart(2, '0')}`
+    : null;
 }

@@ -22,7 +22,9 @@ const line = (what: string, max: number) =>
 export const claimSchema = z.object({
   of: z.enum(CLAIM_KINDS),
   cwPercent: positive('The claimed per cent').max(50, 'A claim above 50 % is no claim.'),
-  ccwPercent: positive('The claimed per cent').max(50, 'A claim above 50 % is no claim.').nullable(),
+  ccwPercent: positive('The claimed per cent')
+    .max(50, 'A claim above 50 % is no claim.')
+    .nullable(),
   fromPercent: z.number().min(0).max(100).optional(),
   plusNm: z.number().min(0).optional(),
 });
@@ -102,7 +104,9 @@ export const joinSchema = z
     if (input.consent === 'working' && points.length === 0) {
       complain('Give at least one working torque, or let the tool be pulled to its maximum.');
     }
-    const outside = points.find((point) => point < input.tool.rangeMin || point > input.tool.rangeMax);
+    const outside = points.find(
+      (point) => point < input.tool.rangeMin || point > input.tool.rangeMax,
+    );
     if (outside !== undefined) complain(`${outside} lies outside the tool’s range.`);
   });
 export type JoinInput = z.input<typeof joinSchema>;

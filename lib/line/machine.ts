@@ -91,7 +91,8 @@ export function moveTag(tag: TagFacts, move: TagMove, now: Date): TagFacts {
   }
   switch (move.kind) {
     case 'call':
-      if (tag.place !== 'visitor') refuse('The tool was left with us: take it on the bench, no call is needed.');
+      if (tag.place !== 'visitor')
+        refuse('The tool was left with us: take it on the bench, no call is needed.');
       if (isHeld(tag, now)) refuse('This turn is held. Release the hold first.');
       return { ...tag, state: 'called', benchId: move.benchId, heldUntil: null };
     case 'mark-away':
@@ -105,13 +106,24 @@ export function moveTag(tag: TagFacts, move: TagMove, now: Date): TagFacts {
       return { ...tag, heldUntil: null };
     case 'hang':
       if (tag.place === 'returned') refuse('The tool has gone home with its owner.');
-      if (tag.state === 'called') return { ...tag, state: 'waiting', place: 'peg', peg: move.peg, benchId: null };
+      if (tag.state === 'called')
+        return { ...tag, state: 'waiting', place: 'peg', peg: move.peg, benchId: null };
       return { ...tag, place: 'peg', peg: move.peg, benchId: null };
     case 'take-on-bench':
-      if (tag.state === 'waiting' && tag.place === 'visitor') refuse('Call this tag first: its owner has the tool.');
-      if (tag.state === 'waiting' && isHeld(tag, now)) refuse('This turn is held. Release the hold first.');
-      if (tag.state === 'called' && tag.benchId !== move.benchId) refuse('This tag is called to another bench.');
-      return { ...tag, state: 'on_bench', place: 'bench', peg: null, benchId: move.benchId, heldUntil: null };
+      if (tag.state === 'waiting' && tag.place === 'visitor')
+        refuse('Call this tag first: its owner has the tool.');
+      if (tag.state === 'waiting' && isHeld(tag, now))
+        refuse('This turn is held. Release the hold first.');
+      if (tag.state === 'called' && tag.benchId !== move.benchId)
+        refuse('This tag is called to another bench.');
+      return {
+        ...tag,
+        state: 'on_bench',
+        place: 'bench',
+        peg: null,
+        benchId: move.benchId,
+        heldUntil: null,
+      };
     case 'abandon':
       return move.to === 'visitor'
         ? { ...tag, state: 'waiting', place: 'visitor', peg: null, benchId: null }

@@ -27,7 +27,8 @@ export function nextTag<T extends LineTag>(tags: readonly T[], now: Date): T | n
  * @throws RangeError when `place` is not a whole number from 1.
  */
 export function positionAt(others: readonly LineTag[], place: number): number {
-  if (!Number.isInteger(place) || place < 1) throw new RangeError('A place in the line is 1 or more.');
+  if (!Number.isInteger(place) || place < 1)
+    throw new RangeError('A place in the line is 1 or more.');
   const order = waitingOrder(others);
   const before = order[place - 2];
   const after = order[place - 1];

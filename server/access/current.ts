@@ -34,7 +34,10 @@ export interface StaffPerson {
 export async function currentStaff(): Promise<StaffPerson | null> {
   const actor = await currentActor();
   if (actor.kind !== 'staff') return null;
-  const [person] = await getRuntime().store.db.select().from(staff).where(eq(staff.id, actor.staffId));
+  const [person] = await getRuntime()
+    .store.db.select()
+    .from(staff)
+    .where(eq(staff.id, actor.staffId));
   if (!person?.active || person.sessionVersion !== actor.sessionVersion) return null;
   return { id: person.id, name: person.name, login: person.login, role: person.role };
 }

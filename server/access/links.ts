@@ -12,4 +12,5 @@ export function linkToken(secret: string, kind: LinkKind, id: string, version: n
 }
 
 /** What the database keeps of a token. */
-export const hashToken = (token: string): string => createHash('sha256').update(token).digest('base64url');
+export const hashToken = (token: string): string =>
+  createHash('sha256').update(token).digest('base64url');

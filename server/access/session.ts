@@ -19,5 +19,10 @@ export const sessionOptions = (secret: string, origin: string): SessionOptions =
   password: secret.slice(0, 64),
   cookieName: SESSION_COOKIE,
   ttl: TTL_SECONDS,
-  cookieOptions: { httpOnly: true, sameSite: 'lax', secure: origin.startsWith('https:'), path: '/' },
+  cookieOptions: {
+    httpOnly: true,
+    sameSite: 'lax',
+    secure: origin.startsWith('https:'),
+    path: '/',
+  },
 });

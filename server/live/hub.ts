@@ -62,7 +62,10 @@ export function createHub(options: HubOptions): LiveHub {
   );
   const bench = createThrottle<string>(
     async (benchId) => {
-      const snapshot = await benchSnapshot({ reader: db, now: clock(), secret, instruments: instruments() }, benchId);
+      const snapshot = await benchSnapshot(
+        { reader: db, now: clock(), secret, instruments: instruments() },
+        benchId,
+      );
       if (snapshot) io?.to(rooms.check(benchId)).emit('bench:changed', snapshot);
     },
     100,
@@ -93,7 +96,10 @@ export function createHub(options: HubOptions): LiveHub {
         const at = clock().toISOString();
         const check = checkView(file);
         io?.to(rooms.check(file.check.benchId)).emit('check:changed', { revision, at, check });
-        io?.to(rooms.ticket(file.tag.id)).emit('ticket:changed', ticketOfFile(file, check, { revision, at }));
+        io?.to(rooms.ticket(file.tag.id)).emit(
+          'ticket:changed',
+          ticketOfFile(file, check, { revision, at }),
+        );
         line.progressed(file.tag.meetId, progressOf(file.check.benchId, check, { revision, at }));
         desk.poke(file.tag.meetId);
         return;

@@ -4,7 +4,10 @@ import type { LiveServer } from './hub';
  * With a PostgreSQL server, several app processes share one line: what one of them emits reaches the
  * clients of all. Alone, there is nothing to connect.
  */
-export async function connectProcesses(io: LiveServer, databaseUrl: string | null): Promise<{ close(): Promise<void> }> {
+export async function connectProcesses(
+  io: LiveServer,
+  databaseUrl: string | null,
+): Promise<{ close(): Promise<void> }> {
   if (!databaseUrl) return { close: async () => undefined };
   const [{ default: pg }, { createAdapter }] = await Promise.all([
     import('pg'),

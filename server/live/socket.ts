@@ -5,7 +5,12 @@ import type { Server as HttpServer } from 'node:http';
 import type { Logger } from 'pino';
 import type { Reader } from '@/db/client';
 import { tags } from '@/db/schema';
-import { joinRoomInput, type ClientToServer, type JoinRoomInput, type ServerToClient } from '@/lib/live/contract';
+import {
+  joinRoomInput,
+  type ClientToServer,
+  type JoinRoomInput,
+  type ServerToClient,
+} from '@/lib/live/contract';
 import type { Actor } from '@/server/access/actor';
 import { hashToken } from '@/server/access/links';
 import { allows, type Permission } from '@/server/access/policy';
@@ -41,7 +46,10 @@ const cookieValue = (header: string | undefined, name: string): string | undefin
     ?.slice(name.length + 1);
 
 /** The socket server: who may enter a room, and what they are shown on entering. */
-export function createSocketServer(options: SocketOptions): { io: LiveServer; close(): Promise<void> } {
+export function createSocketServer(options: SocketOptions): {
+  io: LiveServer;
+  close(): Promise<void>;
+} {
   const { http, db, clock, secret, logger, instruments } = options;
   const io: LiveServer = new Server<ClientToServer, ServerToClient>(http, {
     destroyUpgrade: false,
@@ -54,7 +62,9 @@ export function createSocketServer(options: SocketOptions): { io: LiveServer; cl
   async function actorOf(cookie: string | undefined): Promise<Actor> {
     const sealed = cookieValue(cookie, SESSION_COOKIE);
     if (!sealed) return { kind: 'public' };
-    const session = await unsealData<SessionData>(decodeURIComponent(sealed), { password: secret.slice(0, 64) });
+    const session = await unsealData<SessionData>(decodeURIComponent(sealed), {
+      password: secret.slice(0, 64),
+    });
     return session.staffId
       ? { kind: 'staff', staffId: session.staffId, sessionVersion: session.sessionVersion ?? 0 }
       : { kind: 'public' };
@@ -70,7 +80,10 @@ export function createSocketServer(options: SocketOptions): { io: LiveServer; cl
     const permit = async (permission: Permission) => {
       const standing = await standingOf(db, await actor);
       if (!allows(permission, standing)) {
-        throw new Problem(standing === 'public' ? 'sign-in' : 'forbidden', 'Sign in with a role that may see this.');
+        throw new Problem(
+          standing === 'public' ? 'sign-in' : 'forbidden',
+          'Sign in with a role that may see this.',
+        );
       }
     };
 
@@ -85,7 +98,10 @@ export function createSocketServer(options: SocketOptions): { io: LiveServer; cl
           return;
         }
         case 'ticket': {
-          const [tag] = await db.select({ id: tags.id }).from(tags).where(eq(tags.ticketHash, hashToken(input.token)));
+          const [tag] = await db
+            .select({ id: tags.id })
+            .from(tags)
+            .where(eq(tags.ticketHash, hashToken(input.token)));
           if (!tag) throw new Problem('not-found', 'There is no such ticket.');
           await socket.join(rooms.ticket(tag.id));
           const snapshot = await ticketSnapshot(db, tag.id, now, secret);
@@ -95,7 +111,10 @@ export function createSocketServer(options: SocketOptions): { io: LiveServer; cl
         case 'check': {
           await permit('read.bench');
           await socket.join(rooms.check(input.benchId));
-          const bench = await benchSnapshot({ reader: db, now, secret, instruments: instruments() }, input.benchId);
+          const bench = await benchSnapshot(
+            { reader: db, now, secret, instruments: instruments() },
+            input.benchId,
+          );
           if (!bench) throw new Problem('not-found', 'There is no such bench.');
           socket.emit('bench:changed', bench);
           socket.emit('check:changed', await checkSnapshot(db, input.benchId, now));
@@ -120,7 +139,8 @@ export function createSocketServer(options: SocketOptions): { io: LiveServer; cl
         () => answer({ ok: true }),
         (error: unknown) => {
           const problem = toProblemDocument(error);
-          if (problem.code === 'internal') logger.error({ err: error }, 'a room could not be entered');
+          if (problem.code === 'internal')
+            logger.error({ err: error }, 'a room could not be entered');
           answer({ ok: false, code: problem.code, detail: problem.detail });
         },
       );

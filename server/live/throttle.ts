@@ -2,7 +2,11 @@
  * Runs `work` for a key at once, and then at most every `windowMs`; calls in between are folded into
  * one at the window's end. Never two at a time for one key.
  */
-export function createThrottle<Key>(work: (key: Key) => Promise<void>, windowMs: number, onError: (error: unknown) => void) {
+export function createThrottle<Key>(
+  work: (key: Key) => Promise<void>,
+  windowMs: number,
+  onError: (error: unknown) => void,
+) {
   const states = new Map<Key, { again: boolean; timer: NodeJS.Timeout | null; running: boolean }>();
   let closed = false;
 
