@@ -7,10 +7,7 @@ const wall = (files, groups, why) => ({
   files,
   ignores: ['**/*.test.ts', '**/*.test.tsx'],
   rules: {
-    'no-restricted-imports': [
-      'error',
-      { patterns: [{ group: groups, message: why }] },
-    ],
+    'no-restricted-imports': ['error', { patterns: [{ group: groups, message: why }] }],
   },
 });
 
@@ -21,18 +18,51 @@ export default defineConfig([
   {
     rules: {
       '@typescript-eslint/no-explicit-any': 'error',
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', varsIgnorePattern: '^_' },
+      ],
     },
   },
   wall(
     ['lib/**'],
-    ['@/app/*', '@/components/*', '@/db/*', '@/server/*', 'react', 'react-dom', 'next', 'next/*', 'drizzle-orm*', 'socket.io*', 'node:*', 'fs', 'path'],
+    [
+      '@/app/*',
+      '@/components/*',
+      '@/db/*',
+      '@/server/*',
+      'react',
+      'react-dom',
+      'next',
+      'next/*',
+      'drizzle-orm*',
+      'socket.io*',
+      'node:*',
+      'fs',
+      'path',
+    ],
     'lib is pure computation: no I/O, no framework, nothing of ours outside lib.',
   ),
-  wall(['db/**'], ['@/app/*', '@/components/*', '@/server/*', 'react', 'next', 'next/*'], 'db knows lib only.'),
-  wall(['server/**'], ['@/app/*', '@/components/*', 'react', 'react-dom'], 'server knows db and lib only.'),
-  wall(['components/**'], ['@/app/*', '@/db/*', '@/server/*', 'drizzle-orm*'], 'components know lib only: view models come in as props.'),
-  wall(['app/**'], ['@/db/*', 'drizzle-orm*'], 'routes read through server/queries and write through server/commands.'),
+  wall(
+    ['db/**'],
+    ['@/app/*', '@/components/*', '@/server/*', 'react', 'next', 'next/*'],
+    'db knows lib only.',
+  ),
+  wall(
+    ['server/**'],
+    ['@/app/*', '@/components/*', 'react', 'react-dom'],
+    'server knows db and lib only.',
+  ),
+  wall(
+    ['components/**'],
+    ['@/app/*', '@/db/*', '@/server/*', 'drizzle-orm*'],
+    'components know lib only: view models come in as props.',
+  ),
+  wall(
+    ['app/**'],
+    ['@/db/*', 'drizzle-orm*'],
+    'routes read through server/queries and write through server/commands.',
+  ),
   {
     // Computation takes its clock and its randomness as arguments.
     files: ['lib/**'],
@@ -46,7 +76,10 @@ export default defineConfig([
       ],
       'no-restricted-syntax': [
         'error',
-        { selector: "NewExpression[callee.name='Date'][arguments.length=0]", message: 'A clock is handed in.' },
+        {
+          selector: "NewExpression[callee.name='Date'][arguments.length=0]",
+          message: 'A clock is handed in.',
+        },
       ],
     },
   },

@@ -65,7 +65,10 @@ const ask = (at: string): Promise<LockHolder | null> =>
  * takes no lock, and two processes on one folder lose rows without an error.
  * @throws DataFolderLockedError when another process holds it.
  */
-export async function lockDataFolder(dataDir: string, now: Date): Promise<{ release(): Promise<void> }> {
+export async function lockDataFolder(
+  dataDir: string,
+  now: Date,
+): Promise<{ release(): Promise<void> }> {
   mkdirSync(dataDir, { recursive: true });
   const folder = realpathSync(dataDir);
   const at = address(folder);

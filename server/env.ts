@@ -4,7 +4,9 @@ import { z } from 'zod';
 
 /** A variable that is set but blank counts as missing. */
 const blankless = (env: NodeJS.ProcessEnv) =>
-  Object.fromEntries(Object.entries(env).filter(([, value]) => value !== undefined && value.trim() !== ''));
+  Object.fromEntries(
+    Object.entries(env).filter(([, value]) => value !== undefined && value.trim() !== ''),
+  );
 
 const schema = z.object({
   NODE_ENV: z.enum(['development', 'production', 'test']).default('production'),

@@ -17,7 +17,8 @@ function wordsFor(error: unknown, dataDir: string): string | null {
   if (code === 'EACCES' || code === 'EROFS' || code === 'EPERM') {
     return `The data folder ${dataDir} cannot be written (${code}). Make it writable for this user, or set PULLPOST_DATA.`;
   }
-  if (code === 'EADDRINUSE') return `The port is in use by another program (${message}). Set PORT to a free one.`;
+  if (code === 'EADDRINUSE')
+    return `The port is in use by another program (${message}). Set PORT to a free one.`;
   if (code === 'ENOSPC') return `The disk of the data folder ${dataDir} is full.`;
   return error instanceof Error && error.message.startsWith('The configuration') ? message : null;
 }

@@ -38,13 +38,22 @@ export class Problem extends Error {
 }
 
 const isProblem = (error: unknown): error is Problem =>
-  error instanceof Error && 'code' in error && typeof error.code === 'string' && error.code in PROBLEMS;
+  error instanceof Error &&
+  'code' in error &&
+  typeof error.code === 'string' &&
+  error.code in PROBLEMS;
 
 /** Any error as a problem document. What is not ours says nothing about the inside. */
 export function toProblemDocument(error: unknown): ProblemDocument {
   if (isProblem(error)) {
     const extra = 'extra' in error ? error.extra : undefined;
-    return { type: 'about:blank', code: error.code, ...PROBLEMS[error.code], detail: error.message, ...extra };
+    return {
+      type: 'about:blank',
+      code: error.code,
+      ...PROBLEMS[error.code],
+      detail: error.message,
+      ...extra,
+    };
   }
   return {
     type: 'about:blank',

@@ -31,7 +31,9 @@ export function setRuntime(runtime: Runtime | undefined): void {
 /** @throws Error when no server has started in this process. */
 export function getRuntime(): Runtime {
   if (!holder.pullpostRuntime) {
-    throw new Error('Pullpost has not started: run it with npm start, npm run dev or npm run rehearsal.');
+    throw new Error(
+      'Pullpost has not started: run it with npm start, npm run dev or npm run rehearsal.',
+    );
   }
   return holder.pullpostRuntime;
 }

@@ -13,8 +13,12 @@ const ALPHABET = 'ABCDEFGHJKLMNPRTUVWXY346789';
 export async function setupCodeFor(db: Reader, logger: Logger): Promise<string | null> {
   const [anybody] = await db.select({ id: staff.id }).from(staff).limit(1);
   if (anybody) return null;
-  const letters = Array.from({ length: 8 }, () => ALPHABET.charAt(randomInt(ALPHABET.length))).join('');
+  const letters = Array.from({ length: 8 }, () => ALPHABET.charAt(randomInt(ALPHABET.length))).join(
+    '',
+  );
   const code = `${letters.slice(0, 4)}-${letters.slice(4)}`;
-  logger.warn(`This post has no owner yet. Open it in a browser; the one-time set-up code is ${code}`);
+  logger.warn(
+    `This post has no owner yet. Open it in a browser; the one-time set-up code is ${code}`,
+  );
   return code;
 }

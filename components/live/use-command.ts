@@ -27,7 +27,11 @@ const UNREACHABLE: ProblemAnswer = {
 };
 
 /** Sends one command. The same id may be sent again: the post runs it once. */
-export async function sendCommand<Result>(name: string, id: string, input: unknown): Promise<Result> {
+export async function sendCommand<Result>(
+  name: string,
+  id: string,
+  input: unknown,
+): Promise<Result> {
   const response = await fetch(`/api/commands/${name}`, {
     method: 'POST',
     headers: { 'Content-Type': 'application/json' },

@@ -5,7 +5,9 @@ import type { JoinRoomInput, ServerToClient, Snapshot } from '@/lib/live/contrac
 import { liveSocket } from './socket';
 
 type SnapshotEvent = {
-  [Name in keyof ServerToClient]: Parameters<ServerToClient[Name]>[0] extends Snapshot ? Name : never;
+  [Name in keyof ServerToClient]: Parameters<ServerToClient[Name]>[0] extends Snapshot
+    ? Name
+    : never;
 }[keyof ServerToClient];
 
 export interface RoomState {
@@ -39,7 +41,8 @@ export function useRoom(
     const input = JSON.parse(key) as JoinRoomInput;
     let silence: ReturnType<typeof setTimeout> | undefined;
 
-    const lost = () => setState((before) => (before.connected ? { ...before, connected: false } : before));
+    const lost = () =>
+      setState((before) => (before.connected ? { ...before, connected: false } : before));
     const heard = () => {
       clearTimeout(silence);
       silence = setTimeout(lost, SILENCE_MS);
@@ -53,7 +56,8 @@ export function useRoom(
     const listeners = Object.keys(handlers.current).map((name) => {
       const listener = (snapshot: never) => {
         heard();
-        const handler = handlers.current[name as keyof typeof on] as ((value: never) => void) | undefined;
+        const handler = handlers.current[name as keyof typeof on] as
+          ((value: never) => void) | undefined;
         handler?.(snapshot);
       };
       socket.on(name as SnapshotEvent, listener as never);
@@ -93,8 +97,12 @@ export function useRoom(
 
 /** The newest snapshot: an older one that arrives late is dropped. */
 export function useNewest<Kind extends Snapshot>(initial: Kind): [Kind, (next: Kind) => void];
-export function useNewest<Kind extends Snapshot>(initial: Kind | null): [Kind | null, (next: Kind) => void];
-export function useNewest<Kind extends Snapshot>(initial: Kind | null): [Kind | null, (next: Kind) => void] {
+export function useNewest<Kind extends Snapshot>(
+  initial: Kind | null,
+): [Kind | null, (next: Kind) => void];
+export function useNewest<Kind extends Snapshot>(
+  initial: Kind | null,
+): [Kind | null, (next: Kind) => void] {
   const [newest, setNewest] = useState(initial);
   return [
     newest,
@@ -102,7 +110,8 @@ export function useNewest<Kind extends Snapshot>(initial: Kind | null): [Kind | 
       setNewest((before) => {
         const older =
           before !== null &&
-          (next.revision < before.revision || (next.revision === before.revision && next.at < before.at));
+          (next.revision < before.revision ||
+            (next.revision === before.revision && next.at < before.at));
         return older ? before : next;
       }),
   ];

@@ -185,7 +185,13 @@ export interface BenchSnapshot extends Snapshot {
   next: TagView[];
   waitingCount: number;
   /** The record of the tool that still lies here. */
-  record: { number: string; verdict: Verdict; statement: string; path: string; lowestMark: string | null } | null;
+  record: {
+    number: string;
+    verdict: Verdict;
+    statement: string;
+    path: string;
+    lowestMark: string | null;
+  } | null;
 }
 
 export interface CheckSnapshot extends Snapshot {
@@ -216,7 +222,13 @@ export interface TicketSnapshot extends Snapshot {
 export interface DeskSnapshot extends Snapshot {
   line: LineSnapshot;
   tags: (TagView & { benchNumber: number | null })[];
-  benches: { id: string; number: number; operator: string | null; tester: string | null; barred: string[] }[];
+  benches: {
+    id: string;
+    number: number;
+    operator: string | null;
+    tester: string | null;
+    barred: string[];
+  }[];
 }
 
 export const joinRoomInput = z.discriminatedUnion('room', [

@@ -1,7 +1,6 @@
 import { z } from 'zod';
 import { toolSchema } from '@/lib/line/join';
 
-
 const words = (what: string, max: number) =>
   z.string().trim().max(max, `${what} can have at most ${max} characters.`);
 
@@ -37,7 +36,11 @@ export const startCheckSchema = z.object({
   asFound: asFoundSchema,
   /** `standard` is the sequence that the lead has set for the meet. */
   scheme: z.enum(CHECK_SCHEMES),
-  workingPoints: z.array(z.number().positive('A working torque must be above zero.')).max(6).nullable().default(null),
+  workingPoints: z
+    .array(z.number().positive('A working torque must be above zero.'))
+    .max(6)
+    .nullable()
+    .default(null),
   ownerConfirmed: confirmed('Confirm with the visitor whose tool it is.'),
   cautionsSeen: confirmed('Read the cautions first.'),
   testerModeConfirmed: confirmed('Look at the tester: is it in the mode that this tool needs?'),

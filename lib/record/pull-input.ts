@@ -3,7 +3,9 @@ import { VOID_FAULTS } from '@/lib/torque/faults';
 import { DIRECTIONS } from '@/lib/torque/terms';
 import { TORQUE_UNITS } from '@/lib/torque/units';
 
-const torque = z.number({ error: 'The torque must be a number.' }).min(0, 'A torque is not negative.');
+const torque = z
+  .number({ error: 'The torque must be a number.' })
+  .min(0, 'A torque is not negative.');
 
 /** One pull as it comes in: typed, or from the tester. */
 export const recordPullSchema = z.object({

@@ -15,7 +15,7 @@ export function delivered(
   points: readonly DeliveredPoint[],
   settingNm: number,
 ): { valueNm: number; expandedNm: number } | null {
-  positive(settingNm, 'The setting');
+  notNegative(settingNm, 'The setting');
   if (points.length === 0) throw new RangeError('Nothing was tested: there are no points.');
   const ordered = [...points].sort((one, other) => one.settingNm - other.settingNm);
   ordered.forEach((point, index) => {

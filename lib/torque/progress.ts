@@ -1,4 +1,4 @@
-import type { CheckFacts, PullFact } from './facts';
+import type { CheckFacts, PullFact, ToolFacts } from './facts';
 import type { CheckPlan, PlanStep } from './plan';
 import { isReading } from './readings';
 import { formatTorque } from './units';
@@ -34,7 +34,9 @@ export interface Progress {
  * How far a check has come. A point at which the tool did not let go is settled: nobody is asked to
  * pull it there again.
  */
-export function progressOf(facts: CheckFacts): Progress {
+export function progressOf(
+  facts: Pick<CheckFacts, 'plan' | 'pulls'> & { tool: Pick<ToolFacts, 'unit' | 'division'> },
+): Progress {
   const { plan, pulls } = facts;
   const division = facts.tool.unit === plan.unit ? facts.tool.division : null;
   const byStep = new Map<number, PullFact[]>();

@@ -1,4 +1,4 @@
-import { notNegative, oneOf, positive } from './assert';
+import { notNegative, oneOf } from './assert';
 import { DIRECTIONS, type Direction } from './terms';
 
 /** One line of a tester's certificate. */
@@ -28,7 +28,7 @@ const asCertified = ({ errorPercent, expandedPercent, k }: CertificatePoint): Ce
 /**
  * What the certificate says at a torque in the pull's direction: linear between its points.
  * Null outside the certified range, and where the direction is not certified at all.
- * @throws {RangeError} for a torque that is not above zero, or an unknown direction.
+ * @throws {RangeError} for a negative torque or an unknown direction.
  */
 export function certificateAt(options: {
   points: readonly CertificatePoint[];
@@ -36,7 +36,7 @@ export function certificateAt(options: {
   torqueNm: number;
 }): CertifiedAt | null {
   oneOf(options.direction, DIRECTIONS, 'The direction');
-  const torqueNm = positive(options.torqueNm, 'The torque');
+  const torqueNm = notNegative(options.torqueNm, 'The torque');
   const points = inDirection(options.points, options.direction);
   // A target that was converted from another unit may miss an end of the range by its last digits.
   const same = points.find((point) => Math.abs(point.torqueNm - torqueNm) <= 1e-9 * torqueNm);

@@ -1,4 +1,4 @@
-import { oneOf, positive, range as checkRange } from './assert';
+import { notNegative, oneOf, positive, range as checkRange } from './assert';
 import { claimAt, type Claim, type Limits } from './claim';
 import { BASES, DIRECTIONS, type Basis, type Direction } from './terms';
 
@@ -62,7 +62,7 @@ export function standardTolerance(toolClass: ToolClass, maxTorqueNm: number): To
  * The limits that a check is judged against at a target: the maker's claim where there is one for
  * this direction, else the standard's. `range` and `targetNm` in N·m; limits in per cent of `basis`.
  * Null below the claimed range, and below the range of the tool itself.
- * @throws {RangeError} for a target that is not above zero, a range upside down, or unknown words.
+ * @throws {RangeError} for a negative target, a range upside down, or unknown words.
  */
 export function toleranceAt(options: {
   claim?: Claim | null;
@@ -76,9 +76,9 @@ export function toleranceAt(options: {
   oneOf(direction, DIRECTIONS, 'The direction');
   oneOf(basis, BASES, 'The basis');
   checkRange(range, 'the tool’s range');
-  positive(targetNm, 'The target');
+  notNegative(targetNm, 'The target');
   const standard = standardTolerance(toolClass, range.max);
-  if (targetNm < range.min * (1 - 1e-9)) return null;
+  if (targetNm === 0 || targetNm < range.min * (1 - 1e-9)) return null;
   if (!claim) return standard;
   const limits = claimAt({ claim, rangeMaxNm: range.max, direction, targetNm, basis });
   if (limits === 'below') return null;

@@ -54,7 +54,9 @@ export interface Command<Schema extends z.ZodType, Result> {
 }
 
 const hashOf = (input: unknown): string =>
-  createHash('sha256').update(canonicalize(input) ?? 'null').digest('base64url');
+  createHash('sha256')
+    .update(canonicalize(input) ?? 'null')
+    .digest('base64url');
 
 /** The first complaint for each field, in words. */
 function parse<Schema extends z.ZodType>(schema: Schema, input: unknown): z.output<Schema> {
@@ -67,7 +69,13 @@ function parse<Schema extends z.ZodType>(schema: Schema, input: unknown): z.outp
 
 const UNIQUE_VIOLATION = '23505';
 const codeOf = (error: unknown): unknown =>
-  error && typeof error === 'object' ? ('code' in error ? error.code : 'cause' in error ? codeOf(error.cause) : null) : null;
+  error && typeof error === 'object'
+    ? 'code' in error
+      ? error.code
+      : 'cause' in error
+        ? codeOf(error.cause)
+        : null
+    : null;
 
 /**
  * The one shape of a write: authorise → parse → one transaction (load or refuse, decide in lib,
@@ -86,17 +94,29 @@ export function defineCommand<Schema extends z.ZodType, Result>(
       if (!allows(spec.name, standing)) {
         throw standing === 'public'
           ? new Problem('sign-in', 'Sign in to do this.')
-          : new Problem('forbidden', `This is not open to ${standing === 'operator' ? 'operators' : `a ${standing}`}.`);
+          : new Problem(
+              'forbidden',
+              `This is not open to ${standing === 'operator' ? 'operators' : `a ${standing}`}.`,
+            );
       }
       const input = parse(spec.input, raw);
       const inputHash = hashOf(raw);
       const [earlier] = await tx
         .select({ inputHash: commandRuns.inputHash, result: commandRuns.result })
         .from(commandRuns)
-        .where(and(eq(commandRuns.actor, key), eq(commandRuns.command, spec.name), eq(commandRuns.id, id)));
+        .where(
+          and(
+            eq(commandRuns.actor, key),
+            eq(commandRuns.command, spec.name),
+            eq(commandRuns.id, id),
+          ),
+        );
       if (earlier) {
         if (earlier.inputHash === inputHash) return earlier.result as Result;
-        throw new Problem('key-reused', 'This form was already sent with other content. Reload and try again.');
+        throw new Problem(
+          'key-reused',
+          'This form was already sent with other content. Reload and try again.',
+        );
       }
       const now = ctx.clock();
       const outcome = await spec.run(
@@ -107,7 +127,8 @@ export function defineCommand<Schema extends z.ZodType, Result>(
           now,
           secret: ctx.secret,
           staffId: () => {
-            if (ctx.actor.kind !== 'staff') throw new Problem('forbidden', 'Only staff can do this.');
+            if (ctx.actor.kind !== 'staff')
+              throw new Problem('forbidden', 'Only staff can do this.');
             return ctx.actor.staffId;
           },
         },
@@ -141,7 +162,8 @@ export function defineCommand<Schema extends z.ZodType, Result>(
   }
 
   const fromWire = async (ctx: CommandContext, id: string, raw: unknown): Promise<Result> => {
-    if (!z.uuid().safeParse(id).success) throw new Problem('invalid', 'A command needs a UUID of its own.');
+    if (!z.uuid().safeParse(id).success)
+      throw new Problem('invalid', 'A command needs a UUID of its own.');
     try {
       return await attempt(ctx, id, raw);
     } catch (error) {
@@ -149,11 +171,15 @@ export function defineCommand<Schema extends z.ZodType, Result>(
       // Somebody committed the same key, or took the same slot, at the same moment: look again once.
       return attempt(ctx, id, raw).catch((again: unknown) => {
         throw codeOf(again) === UNIQUE_VIOLATION
-          ? new Problem('conflict', 'Somebody changed the same thing at the same moment. Look again.')
+          ? new Problem(
+              'conflict',
+              'Somebody changed the same thing at the same moment. Look again.',
+            )
           : again;
       });
     }
   };
-  const command = (ctx: CommandContext, id: string, input: z.input<Schema>) => fromWire(ctx, id, input);
+  const command = (ctx: CommandContext, id: string, input: z.input<Schema>) =>
+    fromWire(ctx, id, input);
   return Object.assign(command, { commandName: spec.name, input: spec.input, fromWire });
 }

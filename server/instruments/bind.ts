@@ -31,7 +31,13 @@ interface BindOptions {
  * Testers and benches: a pull goes to the check that runs on the bench where its own tester stands,
  * through the same command as a typed one, and nowhere else.
  */
-export function bindInstruments({ store, clock, secret, logger, hub }: BindOptions): BoundInstruments {
+export function bindInstruments({
+  store,
+  clock,
+  secret,
+  logger,
+  hub,
+}: BindOptions): BoundInstruments {
   const { db } = store;
   // Pulls of one tester are written one after the other, in the order in which they came.
   const queues = new Map<string, Promise<void>>();
@@ -42,7 +48,10 @@ export function bindInstruments({ store, clock, secret, logger, hub }: BindOptio
     onPull: (testerId, pull) => {
       const before = queues.get(testerId) ?? Promise.resolve();
       const done = before.then(() => take(testerId, pull));
-      queues.set(testerId, done.catch(() => undefined));
+      queues.set(
+        testerId,
+        done.catch(() => undefined),
+      );
       return done;
     },
     onStatus: (testerId) => hub.instrumentChanged(testerId),
@@ -52,7 +61,10 @@ export function bindInstruments({ store, clock, secret, logger, hub }: BindOptio
   async function take(testerId: string, pull: InstrumentPull): Promise<void> {
     const file = await runningCheck(testerId);
     if (!file) {
-      hub.notice(testerId, `The tester sent ${pull.raw.trim()}, but no check is running. It was not taken.`);
+      hub.notice(
+        testerId,
+        `The tester sent ${pull.raw.trim()}, but no check is running. It was not taken.`,
+      );
       return;
     }
     const context = {
@@ -72,12 +84,18 @@ export function bindInstruments({ store, clock, secret, logger, hub }: BindOptio
     } catch (error) {
       const problem = toProblemDocument(error);
       if (problem.code === 'internal') throw error;
-      hub.notice(testerId, `The tester sent ${pull.raw.trim()}. It was not taken: ${problem.detail}`);
+      hub.notice(
+        testerId,
+        `The tester sent ${pull.raw.trim()}. It was not taken: ${problem.detail}`,
+      );
     }
   }
 
   async function runningCheck(testerId: string): Promise<CheckFile | null> {
-    const [bench] = await db.select({ id: benches.id }).from(benches).where(eq(benches.testerId, testerId));
+    const [bench] = await db
+      .select({ id: benches.id })
+      .from(benches)
+      .where(eq(benches.testerId, testerId));
     const file = bench ? await loadCheckFile(db, { runningOnBench: bench.id }) : null;
     return file?.tester.id === testerId ? file : null;
   }
@@ -86,11 +104,17 @@ export function bindInstruments({ store, clock, secret, logger, hub }: BindOptio
   function expect(testerId: string, file: CheckFile | null): void {
     const instrument = manager.get(testerId);
     if (!instrument || !isSimulated(instrument)) return;
-    const index = file && !file.check.pausedAt && !file.check.stoppedEarly ? progressOf(factsOf(file)).nextStepIndex : null;
+    const index =
+      file && !file.check.pausedAt && !file.check.stoppedEarly
+        ? progressOf(factsOf(file)).nextStepIndex
+        : null;
     const step = file && index !== null ? file.check.plan.steps[index] : undefined;
     instrument.expect(
       step && file
-        ? { targetNm: convertTorque(step.target, file.check.plan.unit, 'N.m'), direction: step.direction }
+        ? {
+            targetNm: convertTorque(step.target, file.check.plan.unit, 'N.m'),
+            direction: step.direction,
+          }
         : null,
     );
   }
@@ -109,7 +133,8 @@ export function bindInstruments({ store, clock, secret, logger, hub }: BindOptio
     ...manager,
     async follow() {
       hub.onEvent((event) => {
-        const failed = (error: unknown) => logger.error({ err: error }, 'testers could not be followed');
+        const failed = (error: unknown) =>
+          logger.error({ err: error }, 'testers could not be followed');
         if (event.kind === 'check') expect(event.file.tester.id, event.file);
         if (event.kind === 'testers') sync().catch(failed);
         if (event.kind === 'check-ended') {

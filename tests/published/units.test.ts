@@ -1,4 +1,4 @@
-import { create, all } from 'mathjs';
+import { unit as mathUnit } from 'mathjs';
 import { describe, expect, it } from 'vitest';
 import { convertTorque, TORQUE_UNITS, type TorqueUnit } from '@/lib/torque/units';
 
@@ -15,7 +15,6 @@ describe('NIST SP 811 (2008), Appendix B.8: torque to N·m, seven figures', () =
 });
 
 describe('mathjs units, which hold the same definitions', () => {
-  const math = create(all);
   const names: Record<TorqueUnit, string> = {
     'N.m': 'N m',
     'lbf.ft': 'lbf ft',
@@ -26,7 +25,7 @@ describe('mathjs units, which hold the same definitions', () => {
     'kgf.cm': 'kgf cm',
   };
   it.each(TORQUE_UNITS)('%s', (unit) => {
-    const oracle = math.unit(unit === 'ozf.in' ? 1 / 16 : 1, names[unit]).toNumber('N m');
+    const oracle = mathUnit(unit === 'ozf.in' ? 1 / 16 : 1, names[unit]).toNumber('N m');
     expect(Math.abs(convertTorque(1, unit, 'N.m') / oracle - 1)).toBeLessThan(1e-12);
   });
 });

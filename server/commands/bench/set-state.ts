@@ -15,7 +15,8 @@ const setState = <Name extends Permission>(name: Name, state: BenchState) =>
       const bench = await lockBench(tx, input.benchId);
       if (state === 'closed') {
         const busy = (await tagsAtBench(tx, bench.id))[0];
-        if (busy) throw new Problem('wrong-move', `${busy.code} is still at bench ${bench.number}.`);
+        if (busy)
+          throw new Problem('wrong-move', `${busy.code} is still at bench ${bench.number}.`);
       }
       await tx
         .update(benches)

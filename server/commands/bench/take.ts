@@ -17,13 +17,18 @@ export const takeBench = defineCommand({
     const left = await tx
       .update(benches)
       .set({ operatorId: null })
-      .where(and(eq(benches.meetId, bench.meetId), eq(benches.operatorId, me), ne(benches.id, bench.id)))
+      .where(
+        and(eq(benches.meetId, bench.meetId), eq(benches.operatorId, me), ne(benches.id, bench.id)),
+      )
       .returning();
     await tx.update(benches).set({ operatorId: me }).where(eq(benches.id, bench.id));
     return {
       result: { benchId },
       entry: benchEntry(bench),
-      events: [...benchEvents(bench), ...left.map((row) => ({ kind: 'bench' as const, benchId: row.id }))],
+      events: [
+        ...benchEvents(bench),
+        ...left.map((row) => ({ kind: 'bench' as const, benchId: row.id })),
+      ],
     };
   },
 });

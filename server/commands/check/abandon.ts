@@ -2,7 +2,15 @@ import { and, eq } from 'drizzle-orm';
 import { z } from 'zod';
 import { checks } from '@/db/schema';
 import { defineCommand } from '@/server/commands/command';
-import { lockTag, reason, saveMove, tagEntry, tagEvents, tagInput, takePeg } from '@/server/commands/tag/shared';
+import {
+  lockTag,
+  reason,
+  saveMove,
+  tagEntry,
+  tagEvents,
+  tagInput,
+  takePeg,
+} from '@/server/commands/tag/shared';
 
 /**
  * Gives a check up without a record, before or after it began: the tool goes back to its owner or on

@@ -16,7 +16,10 @@ export async function lockCheck(tx: Transaction, checkId: string): Promise<Check
 /** @throws Problem `wrong-move` when the check has ended. */
 export function running(file: CheckFile): CheckFile {
   if (file.check.state !== 'running') {
-    throw new Problem('wrong-move', `This check of ${file.tag.code} is ${file.check.state} already.`);
+    throw new Problem(
+      'wrong-move',
+      `This check of ${file.tag.code} is ${file.check.state} already.`,
+    );
   }
   return file;
 }

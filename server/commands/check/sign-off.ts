@@ -17,7 +17,10 @@ const NAMED = 4;
 function refuseMissing(missing: string[]): never {
   const named = missing.slice(0, NAMED).join('; ');
   const more = missing.length > NAMED ? ` and ${missing.length - NAMED} more` : '';
-  throw new Problem('wrong-move', `Not yet: ${named}${more}. Take them, or stop early and say why.`);
+  throw new Problem(
+    'wrong-move',
+    `Not yet: ${named}${more}. Take them, or stop early and say why.`,
+  );
 }
 
 /**
@@ -30,7 +33,8 @@ export const signOff = defineCommand({
   run: async ({ tx, now, secret, staffId }, { checkId }) => {
     const file = await lockCheck(tx, checkId);
     const offered = file.pulls.find(({ accepted, voided }) => !accepted && !voided);
-    if (offered) throw new Problem('wrong-move', 'A value of the tester still waits: accept it, or void it.');
+    if (offered)
+      throw new Problem('wrong-move', 'A value of the tester still waits: accept it, or void it.');
 
     const [meet] = await tx.select().from(meets).where(eq(meets.id, file.check.meetId));
     // The post's row is taken so that no number is given out twice.
@@ -43,7 +47,13 @@ export const signOff = defineCommand({
     const sequence = (last?.sequence ?? 0) + 1;
     const number = `${post!.shortName}-${year}-${String(sequence).padStart(4, '0')}`;
 
-    const content = signedRecord(file, { number, now, staffId: staffId(), post: post!, meet: meet! });
+    const content = signedRecord(file, {
+      number,
+      now,
+      staffId: staffId(),
+      post: post!,
+      meet: meet!,
+    });
     if (content.evaluation.missing.length > 0 && !file.check.stoppedEarly) {
       refuseMissing(content.evaluation.missing);
     }

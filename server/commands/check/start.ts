@@ -35,7 +35,8 @@ function planFor(input: Input, meet: Meet, tester: { minNm: number; maxNm: numbe
       overrides: settings.overrides,
     });
   } catch (error) {
-    if (error instanceof RangeError || error instanceof TypeError) throw new Problem('invalid', error.message);
+    if (error instanceof RangeError || error instanceof TypeError)
+      throw new Problem('invalid', error.message);
     throw error;
   }
 }
@@ -57,8 +58,10 @@ export const startCheck = defineCommand({
       .select({ id: checks.id })
       .from(checks)
       .where(and(eq(checks.benchId, bench.id), eq(checks.state, 'running')));
-    if (other) throw new Problem('conflict', `A check is running on bench ${bench.number} already.`);
-    if (!bench.testerId) throw new Problem('wrong-move', `Bench ${bench.number} has no tester. Ask a lead.`);
+    if (other)
+      throw new Problem('conflict', `A check is running on bench ${bench.number} already.`);
+    if (!bench.testerId)
+      throw new Problem('wrong-move', `Bench ${bench.number} has no tester. Ask a lead.`);
     if (tag.consent === 'working' && input.scheme !== 'working') {
       throw new Problem('invalid', 'The visitor agreed to working points only.', {
         fields: { scheme: 'The visitor agreed to working points only.' },

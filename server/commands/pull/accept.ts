@@ -11,12 +11,18 @@ export const acceptPull = defineCommand({
   name: 'pull.accept',
   input: acceptPullSchema,
   run: async ({ tx, now, staffId }, input) => {
-    const [row] = await tx.select({ checkId: pulls.checkId }).from(pulls).where(eq(pulls.id, input.pullId));
+    const [row] = await tx
+      .select({ checkId: pulls.checkId })
+      .from(pulls)
+      .where(eq(pulls.id, input.pullId));
     if (!row) throw new Problem('not-found', 'There is no such pull.');
     const file = await lockCheck(tx, row.checkId);
     const offered = file.pulls.find(({ pull }) => pull.id === input.pullId)!;
     if (offered.voided || offered.accepted) {
-      throw new Problem('conflict', `This pull was ${offered.voided ? 'voided' : 'accepted'} already.`);
+      throw new Problem(
+        'conflict',
+        `This pull was ${offered.voided ? 'voided' : 'accepted'} already.`,
+      );
     }
     const step = file.check.plan.steps[offered.pull.stepIndex]!;
     const { setting } = file.check.plan;
@@ -29,7 +35,11 @@ export const acceptPull = defineCommand({
     const accepted = await insertDecision(
       tx,
       offered.pull,
-      { decision: 'accepted', toolValue: setting ? step.target : input.toolValue, byStaffId: staffId() },
+      {
+        decision: 'accepted',
+        toolValue: setting ? step.target : input.toolValue,
+        byStaffId: staffId(),
+      },
       now,
     );
     const after = file.pulls.map((one) => (one === offered ? { ...one, accepted } : one));

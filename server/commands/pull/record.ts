@@ -20,7 +20,10 @@ export const recordPull = defineCommand({
     const { index, step } = stepNow(file);
     const { setting } = file.check.plan;
     if (input.direction !== null && input.direction !== step.direction) {
-      throw new Problem('invalid', `The pull went the other way: this step is ${step.direction === 'cw' ? 'clockwise' : 'counter-clockwise'}.`);
+      throw new Problem(
+        'invalid',
+        `The pull went the other way: this step is ${step.direction === 'cw' ? 'clockwise' : 'counter-clockwise'}.`,
+      );
     }
     const typed = actor.kind === 'staff';
     const reading = step.kind === 'reading';
@@ -28,7 +31,9 @@ export const recordPull = defineCommand({
       throw new Problem('invalid', 'Only a reading of a setting tool can end without a release.');
     }
     if (reading && input.value === null) {
-      throw new Problem('invalid', 'Type what the tester shows.', { fields: { value: 'Type what the tester shows.' } });
+      throw new Problem('invalid', 'Type what the tester shows.', {
+        fields: { value: 'Type what the tester shows.' },
+      });
     }
     const rawNm = input.value === null ? null : convertTorque(input.value, input.unit, 'N.m');
     if (rawNm !== null) checkRaw(file, rawNm);
@@ -37,7 +42,8 @@ export const recordPull = defineCommand({
         fields: { toolValue: 'Type what the tool’s own display showed.' },
       });
     }
-    if (typed && reading && input.outcome === 'reading') askAbout(file, step, rawNm!, input.confirmed);
+    if (typed && reading && input.outcome === 'reading')
+      askAbout(file, step, rawNm!, input.confirmed);
 
     const byStaffId = actor.kind === 'staff' ? actor.staffId : null;
     const taken = await insertPull(
@@ -63,7 +69,11 @@ export const recordPull = defineCommand({
     }
     return {
       result: { pullId: taken.pull.id, accepted: taken.accepted !== null },
-      entry: checkEntry(file, { pullId: taken.pull.id, step: index, accepted: taken.accepted !== null }),
+      entry: checkEntry(file, {
+        pullId: taken.pull.id,
+        step: index,
+        accepted: taken.accepted !== null,
+      }),
       events: [{ kind: 'check', file: { ...file, pulls: [...file.pulls, taken] } }],
     };
   },

@@ -17,7 +17,8 @@ type NewPull = Pick<typeof pulls.$inferInsert, 'rawNm' | 'source' | 'outcome' | 
 /** The step that the next pull belongs to. @throws Problem when none may be taken now. */
 export function stepNow(file: CheckFile): { index: number; step: PlanStep } {
   if (file.check.pausedAt) throw new Problem('wrong-move', 'The check is paused. Go on first.');
-  if (file.check.stoppedEarly) throw new Problem('wrong-move', 'The pulls were ended early. Sign off, or abandon.');
+  if (file.check.stoppedEarly)
+    throw new Problem('wrong-move', 'The pulls were ended early. Sign off, or abandon.');
   const index = progressOf(factsOf(file)).nextStepIndex;
   if (index === null) throw new Problem('wrong-move', 'Every pull of the plan has been taken.');
   return { index, step: file.check.plan.steps[index]! };
@@ -25,7 +26,10 @@ export function stepNow(file: CheckFile): { index: number; step: PlanStep } {
 
 /** Refuses what no tester could have measured. Nothing here looks at tolerance or target. */
 export function checkRaw(file: CheckFile, rawNm: number): void {
-  if (rawNm <= 0) throw new Problem('invalid', 'A pull needs a torque above zero.', { fields: { value: 'Above zero, please.' } });
+  if (rawNm <= 0)
+    throw new Problem('invalid', 'A pull needs a torque above zero.', {
+      fields: { value: 'Above zero, please.' },
+    });
   if (rawNm > file.tester.maxNm * 1.000001) {
     const words = `${formatTorque(rawNm, 'N.m')} is above the tester’s range, which ends at ${formatTorque(file.tester.maxNm, 'N.m')}.`;
     throw new Problem('invalid', words, { fields: { value: words } });
@@ -56,7 +60,11 @@ export async function insertPull(
     sequence: file.pulls.length + 1,
     stepIndex,
     correctionNm: correct
-      ? correctionNm({ points: file.certificate!.points, direction: step.direction, rawNm: given.rawNm! })
+      ? correctionNm({
+          points: file.certificate!.points,
+          direction: step.direction,
+          rawNm: given.rawNm!,
+        })
       : 0,
     at: now,
     ...given,
@@ -71,7 +79,10 @@ export async function insertPull(
 export async function insertDecision(
   tx: Transaction,
   pull: PullFile['pull'],
-  decision: Pick<typeof pullDecisions.$inferInsert, 'decision' | 'toolValue' | 'fault' | 'note' | 'byStaffId'>,
+  decision: Pick<
+    typeof pullDecisions.$inferInsert,
+    'decision' | 'toolValue' | 'fault' | 'note' | 'byStaffId'
+  >,
   now: Date,
 ): Promise<typeof pullDecisions.$inferSelect> {
   const row = {

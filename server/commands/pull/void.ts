@@ -16,7 +16,10 @@ export const voidPull = defineCommand({
   name: 'pull.void',
   input: voidPullSchema,
   run: async ({ tx, now, staffId, standing }, input) => {
-    const [row] = await tx.select({ checkId: pulls.checkId }).from(pulls).where(eq(pulls.id, input.pullId));
+    const [row] = await tx
+      .select({ checkId: pulls.checkId })
+      .from(pulls)
+      .where(eq(pulls.id, input.pullId));
     if (!row) throw new Problem('not-found', 'There is no such pull.');
     const file = await lockCheck(tx, row.checkId);
     const { steps } = file.check.plan;
@@ -25,7 +28,12 @@ export const voidPull = defineCommand({
     const at = steps[target.pull.stepIndex]!;
     const voidedAtPoint = file.pulls.filter(({ pull, voided }) => {
       const step = steps[pull.stepIndex]!;
-      return voided && step.kind === at.kind && step.direction === at.direction && step.target === at.target;
+      return (
+        voided &&
+        step.kind === at.kind &&
+        step.direction === at.direction &&
+        step.target === at.target
+      );
     }).length;
     if (!mayVoid({ voidedAtPoint, role: standing as Role })) {
       throw new Problem(

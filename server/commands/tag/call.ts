@@ -17,7 +17,10 @@ export const callTag = defineCommand({
   run: async ({ tx, now }, input) => {
     const bench = await lockBench(tx, input.benchId);
     if (bench.state !== 'open') {
-      throw new Problem('wrong-move', `Bench ${bench.number} is ${bench.state}. Open it before you call.`);
+      throw new Problem(
+        'wrong-move',
+        `Bench ${bench.number} is ${bench.state}. Open it before you call.`,
+      );
     }
     const busy = (await tagsAtBench(tx, bench.id))[0];
     if (busy) {
@@ -38,7 +41,8 @@ export const callTag = defineCommand({
       if (tagId === null) throw new Problem('wrong-move', 'Nobody is waiting.');
     }
     const tag = await lockTag(tx, tagId);
-    if (tag.meetId !== bench.meetId) throw new Problem('not-found', 'There is no such tag at this meet.');
+    if (tag.meetId !== bench.meetId)
+      throw new Problem('not-found', 'There is no such tag at this meet.');
     if (tag.state !== 'waiting' && tag.benchId) {
       throw new Problem('conflict', `${tag.code} has just been called or taken by another bench.`);
     }

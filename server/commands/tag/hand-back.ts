@@ -10,7 +10,9 @@ import { lockTag, saveMove, tagEntry, tagEvents, tagInput } from './shared';
  */
 export const handBack = defineCommand({
   name: 'tag.hand-back',
-  input: tagInput.extend({ ticketCode: z.string().trim().min(1, 'Type the code on the ticket.').max(10) }),
+  input: tagInput.extend({
+    ticketCode: z.string().trim().min(1, 'Type the code on the ticket.').max(10),
+  }),
   run: async ({ tx, now }, { tagId, ticketCode }) => {
     const tag = await lockTag(tx, tagId);
     const code = parseTagCode(ticketCode);

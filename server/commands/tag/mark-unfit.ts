@@ -14,7 +14,8 @@ export const markUnfit = defineCommand({
       .select({ id: checks.id })
       .from(checks)
       .where(and(eq(checks.tagId, tag.id), eq(checks.state, 'running')));
-    if (running) throw new Problem('wrong-move', `A check of ${tag.code} is running: abandon it first.`);
+    if (running)
+      throw new Problem('wrong-move', `A check of ${tag.code} is running: abandon it first.`);
     const moved = await saveMove(tx, tag, { kind: 'mark-unfit', reason: input.reason }, now);
     return {
       result: { tagId: tag.id, state: moved.state },

@@ -38,7 +38,11 @@ export async function saveMove(
 }
 
 /** The lowest free peg of the meet, or the given one when it is free. */
-export async function takePeg(tx: Transaction, meetId: string, wanted: number | null): Promise<number> {
+export async function takePeg(
+  tx: Transaction,
+  meetId: string,
+  wanted: number | null,
+): Promise<number> {
   const taken = (
     await tx
       .select({ peg: tags.peg })

@@ -10,9 +10,11 @@ export const takeOnBench = defineCommand({
   input: tagInput.extend({ benchId: z.uuid() }),
   run: async ({ tx, now }, input) => {
     const bench = await lockBench(tx, input.benchId);
-    if (bench.state !== 'open') throw new Problem('wrong-move', `Bench ${bench.number} is ${bench.state}.`);
+    if (bench.state !== 'open')
+      throw new Problem('wrong-move', `Bench ${bench.number} is ${bench.state}.`);
     const tag = await lockTag(tx, input.tagId);
-    if (tag.meetId !== bench.meetId) throw new Problem('not-found', 'There is no such tag at this meet.');
+    if (tag.meetId !== bench.meetId)
+      throw new Problem('not-found', 'There is no such tag at this meet.');
     const other = (await tagsAtBench(tx, bench.id)).find((row) => row.id !== tag.id);
     if (other) {
       throw new Problem(

@@ -25,7 +25,10 @@ const NEXT = 5;
 
 /** The bench that a tester stands on, or null. */
 export async function benchOfTester(reader: Reader, testerId: string): Promise<string | null> {
-  const [bench] = await reader.select({ id: benches.id }).from(benches).where(eq(benches.testerId, testerId));
+  const [bench] = await reader
+    .select({ id: benches.id })
+    .from(benches)
+    .where(eq(benches.testerId, testerId));
   return bench?.id ?? null;
 }
 
@@ -41,7 +44,9 @@ async function testerOf(scope: BenchScope, testerId: string, meet: typeof meets.
     certificate: certificateWords(today.certificate),
     proof: proofWords(today.proof, meet.timeZone),
     barred: today.barred.map((code) =>
-      code === 'tester-locked' ? `${reasonWords(code)} ${today.tester.lockedReason}` : reasonWords(code),
+      code === 'tester-locked'
+        ? `${reasonWords(code)} ${today.tester.lockedReason}`
+        : reasonWords(code),
     ),
     instrument: {
       state: status?.state ?? ('detached' as const),
@@ -51,7 +56,10 @@ async function testerOf(scope: BenchScope, testerId: string, meet: typeof meets.
 }
 
 /** The record of the tool that lies on the bench, once its check is signed. */
-async function recordOf({ reader, secret }: BenchScope, row: StaffTagRow | undefined): Promise<BenchSnapshot['record']> {
+async function recordOf(
+  { reader, secret }: BenchScope,
+  row: StaffTagRow | undefined,
+): Promise<BenchSnapshot['record']> {
   if (!row || row.tag.state !== 'ready') return null;
   const [record] = await reader
     .select()
@@ -71,7 +79,10 @@ async function recordOf({ reader, secret }: BenchScope, row: StaffTagRow | undef
 }
 
 /** Everything on a bench but its check, or null when there is no such bench. */
-export async function benchSnapshot(scope: BenchScope, benchId: string): Promise<BenchSnapshot | null> {
+export async function benchSnapshot(
+  scope: BenchScope,
+  benchId: string,
+): Promise<BenchSnapshot | null> {
   const { reader, now } = scope;
   const revision = await currentRevision(reader);
   const [head] = await reader
@@ -86,7 +97,10 @@ export async function benchSnapshot(scope: BenchScope, benchId: string): Promise
     .where(
       and(
         eq(tags.meetId, meet.id),
-        or(eq(tags.state, 'waiting'), and(eq(tags.benchId, bench.id), inArray(tags.place, ['visitor', 'bench']))),
+        or(
+          eq(tags.state, 'waiting'),
+          and(eq(tags.benchId, bench.id), inArray(tags.place, ['visitor', 'bench'])),
+        ),
       ),
     )
     .orderBy(asc(tags.position));

@@ -28,7 +28,9 @@ export const pullFact = (plan: CheckPlan, one: PullFile): PullFact => ({
 export function factsOf(file: CheckFile): CheckFacts {
   const { check, tool, tester, certificate, proof, meet } = file;
   const today = serviceDay(check.startedAt, meet.timeZone, meet.dayStartHour);
-  const days = certificate ? (check.startedAt.getTime() - Date.parse(certificate.issuedOn)) / MS_A_DAY : 0;
+  const days = certificate
+    ? (check.startedAt.getTime() - Date.parse(certificate.issuedOn)) / MS_A_DAY
+    : 0;
   return {
     plan: check.plan,
     tool: {

@@ -15,7 +15,10 @@ function instructionFor(plan: CheckPlan, step: PlanStep, first: boolean, label: 
       ? `Pull slowly until the tool shows ${label}. Then let go, and see that it shows zero.`
       : `Pull slowly until the tool shows ${label}, and hold. Read both.`;
   }
-  if (!first) return step.kind === 'exercise' ? 'Again, smoothly, until it lets go.' : `Leave it at ${label}. Pull again until it lets go.`;
+  if (!first)
+    return step.kind === 'exercise'
+      ? 'Again, smoothly, until it lets go.'
+      : `Leave it at ${label}. Pull again until it lets go.`;
   return `Set ${label}, coming up from below. Pull smoothly until it lets go.`;
 }
 
@@ -43,11 +46,15 @@ export function stepView(file: CheckFile, index: number): StepView {
     targetLabel: formatNumber(step.target, { division }),
     unitLabel: unitText(plan.unit),
     heading:
-      step.kind === 'exercise' ? `Exercise pulls, ${direction}` : `Set point ${point} of ${points.length}, ${direction}`,
+      step.kind === 'exercise'
+        ? `Exercise pulls, ${direction}`
+        : `Set point ${point} of ${points.length}, ${direction}`,
     pullWords: `Pull ${number} of ${same.length}`,
     number,
     of: same.length,
-    stopLabel: plan.setting ? formatTorque(convertTorque(stopNm, 'N.m', plan.unit), plan.unit) : null,
+    stopLabel: plan.setting
+      ? formatTorque(convertTorque(stopNm, 'N.m', plan.unit), plan.unit)
+      : null,
     instruction: instructionFor(plan, step, number === 1, label),
   };
 }

@@ -4,7 +4,13 @@ import { evaluateCheck, type CheckEvaluation, type PointEvaluation } from '@/lib
 import { relativeDeviation } from '@/lib/torque/deviation';
 import { VOID_FAULT_LABELS } from '@/lib/torque/faults';
 import type { CheckPlan } from '@/lib/torque/plan';
-import { convertTorque, decimalsOf, formatNumber, formatTorque, unitText } from '@/lib/torque/units';
+import {
+  convertTorque,
+  decimalsOf,
+  formatNumber,
+  formatTorque,
+  unitText,
+} from '@/lib/torque/units';
 import { deviationWords, reasonWords } from '@/lib/torque/words';
 import { progressWords } from '@/server/queries/line/progress';
 import { factsOf, pullState } from './facts';
@@ -37,7 +43,10 @@ export function corridorPoint(
     verdict: point.verdict,
     reasons: point.reasons.map(({ words }) => words),
     delivered: point.meanDelivered
-      ? deliveredWords({ targetLabel: label, setting: plan.setting, unit: plan.unit }, point.meanDelivered)
+      ? deliveredWords(
+          { targetLabel: label, setting: plan.setting, unit: plan.unit },
+          point.meanDelivered,
+        )
       : null,
   };
 }
@@ -67,7 +76,9 @@ function pullView(file: CheckFile, one: PullFile): PullView {
     reference:
       referenceNm === null
         ? null
-        : formatTorque(convertTorque(referenceNm, 'N.m', plan.unit), plan.unit, { division: places }),
+        : formatTorque(convertTorque(referenceNm, 'N.m', plan.unit), plan.unit, {
+            division: places,
+          }),
     tool: toolValue === null ? null : formatTorque(toolValue, plan.unit, { division }),
     deviation,
     words: deviation === null ? null : deviationWords(deviation, plan.basis),
@@ -78,7 +89,10 @@ function pullView(file: CheckFile, one: PullFile): PullView {
 }
 
 /** A check as the bench sees it, all derived from its file. */
-export function checkView(file: CheckFile, evaluation: CheckEvaluation = evaluateCheck(factsOf(file))): CheckView {
+export function checkView(
+  file: CheckFile,
+  evaluation: CheckEvaluation = evaluateCheck(factsOf(file)),
+): CheckView {
   const { check, tool } = file;
   const { plan } = check;
   const division = tool.unit === plan.unit ? tool.division : null;
@@ -103,7 +117,9 @@ export function checkView(file: CheckFile, evaluation: CheckEvaluation = evaluat
         point,
         plan,
         division,
-        step?.kind === 'reading' && step.direction === point.direction && step.target === point.target,
+        step?.kind === 'reading' &&
+          step.direction === point.direction &&
+          step.target === point.target,
       ),
     ),
     progress: evaluation.progress,

@@ -8,7 +8,11 @@ import { lineSnapshot } from '@/server/queries/line/snapshot';
 import { testerToday } from '@/server/queries/tester/standing';
 
 /** The whole line as the lead sees it: with names, pegs and what each bench lacks. */
-export async function deskSnapshot(reader: Reader, meetId: string, now: Date): Promise<DeskSnapshot | null> {
+export async function deskSnapshot(
+  reader: Reader,
+  meetId: string,
+  now: Date,
+): Promise<DeskSnapshot | null> {
   const line = await lineSnapshot(reader, meetId, now);
   const [meet] = await reader.select().from(meets).where(eq(meets.id, meetId));
   if (!line || !meet) return null;
@@ -30,7 +34,13 @@ export async function deskSnapshot(reader: Reader, meetId: string, now: Date): P
   };
   const deskBenches: DeskSnapshot['benches'] = [];
   for (const { bench, operator, tester } of posts) {
-    deskBenches.push({ id: bench.id, number: bench.number, operator, tester, barred: await barredOf(bench.testerId) });
+    deskBenches.push({
+      id: bench.id,
+      number: bench.number,
+      operator,
+      tester,
+      barred: await barredOf(bench.testerId),
+    });
   }
   return {
     revision: line.revision,

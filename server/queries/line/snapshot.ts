@@ -32,7 +32,15 @@ const openTags = (reader: Reader, meetId: string) =>
     .where(
       and(
         eq(tags.meetId, meetId),
-        inArray(tags.state, ['waiting', 'called', 'on_bench', 'ready', 'away', 'withdrawn', 'unfit']),
+        inArray(tags.state, [
+          'waiting',
+          'called',
+          'on_bench',
+          'ready',
+          'away',
+          'withdrawn',
+          'unfit',
+        ]),
         ne(tags.place, 'returned'),
       ),
     )
@@ -62,7 +70,11 @@ async function runningChecks(reader: Reader, meetId: string): Promise<RunningChe
       tool,
       pulls: files.map((one) => pullFact(check.plan, one)),
     });
-    return { benchId: check.benchId, progress, words: progressWords(check.plan.steps, nextStepIndex) };
+    return {
+      benchId: check.benchId,
+      progress,
+      words: progressWords(check.plan.steps, nextStepIndex),
+    };
   });
 }
 
@@ -88,7 +100,12 @@ function benchOf(
   const check = running.find((row) => row.benchId === bench.id);
   const words = (): string => {
     if (check) return check.words;
-    if (lying) return lying.state === 'on_bench' ? 'Getting ready' : lying.state === 'ready' ? 'Checked. Ready to collect' : 'Not checked';
+    if (lying)
+      return lying.state === 'on_bench'
+        ? 'Getting ready'
+        : lying.state === 'ready'
+          ? 'Checked. Ready to collect'
+          : 'Not checked';
     if (bench.state === 'paused') return 'Short break';
     if (bench.state === 'closed') return 'Closed';
     return called ? 'Waiting for its owner' : 'Free';
@@ -98,14 +115,20 @@ function benchOf(
     number: bench.number,
     state: bench.state,
     tag: lying ? { code: lying.code, state: lying.state, tool: tagLine(lying.tool) } : null,
-    called: called ? { code: called.code, calledAt: (called.calledAt ?? new Date(0)).toISOString() } : null,
+    called: called
+      ? { code: called.code, calledAt: (called.calledAt ?? new Date(0)).toISOString() }
+      : null,
     progress: check?.progress ?? null,
     words: words(),
   };
 }
 
 /** The line of a meet as everybody may see it, or null when there is no such meet. */
-export async function lineSnapshot(reader: Reader, meetId: string, now: Date): Promise<LineSnapshot | null> {
+export async function lineSnapshot(
+  reader: Reader,
+  meetId: string,
+  now: Date,
+): Promise<LineSnapshot | null> {
   // The revision is read first: what is read later can only be newer than it says.
   const revision = await currentRevision(reader);
   const [meet] = await reader.select().from(meets).where(eq(meets.id, meetId));
@@ -141,7 +164,10 @@ export async function lineSnapshot(reader: Reader, meetId: string, now: Date): P
       .filter((tag) => tag.state === 'ready')
       .map((tag) => {
         const bench = rows.find((row) => row.id === tag.benchId);
-        return { code: tag.code, where: tag.place === 'peg' ? `peg ${tag.peg}` : `bench ${bench?.number ?? '?'}` };
+        return {
+          code: tag.code,
+          where: tag.place === 'peg' ? `peg ${tag.peg}` : `bench ${bench?.number ?? '?'}`,
+        };
       }),
     away: line.filter((tag) => tag.state === 'away').map((tag) => tag.code),
     today,

@@ -36,7 +36,8 @@ export async function testerToday(
     .where(eq(testerProofs.testerId, testerId))
     .orderBy(desc(testerProofs.at))
     .limit(1);
-  const proof = newest && serviceDay(newest.at, meet.timeZone, meet.dayStartHour) === today ? newest : null;
+  const proof =
+    newest && serviceDay(newest.at, meet.timeZone, meet.dayStartHour) === today ? newest : null;
   return {
     tester,
     certificate,

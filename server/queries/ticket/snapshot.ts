@@ -19,7 +19,8 @@ const ticketCheck = (view: CheckView): NonNullable<TicketSnapshot['check']> => (
     .map((pull) => ({
       label: pull.target,
       reference: pull.reference ?? '',
-      words: pull.outcome === 'no-release' ? `did not let go by ${pull.reference}` : (pull.words ?? ''),
+      words:
+        pull.outcome === 'no-release' ? `did not let go by ${pull.reference}` : (pull.words ?? ''),
     })),
 });
 
