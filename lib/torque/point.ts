@@ -4,7 +4,7 @@ import { summarise, type Summary } from './deviation';
 import type { Budget, PointEvaluation } from './evaluation';
 import type { CheckFacts, PullFact } from './facts';
 import type { PlanPoint } from './plan';
-import { deviationOf, meanAtTarget, readingsOf, referenceOf, voidedOf } from './readings';
+import { meanAtTarget, noReleaseOf, readingsOf, voidedOf } from './readings';
 import type { PointContext } from './readings';
 import { certificateAt, type CertifiedAt } from './tester';
 import { standardTolerance, toleranceAt, type Tolerance } from './tool';
@@ -63,17 +63,7 @@ function judgementOf(
 ) {
   const { facts, limits, targetNm } = context;
   const { pulls, deviations, requiredReadings, referenceExpanded } = input;
-  const noReleases = pulls.filter(
-    (pull) => pull.state === 'accepted' && pull.outcome === 'no-release',
-  );
-  // The pull that went highest says most: the tool has delivered at least that much.
-  const highest = noReleases.reduce<PullFact | null>(
-    (best, pull) =>
-      (referenceOf(pull) ?? 0) > (best ? (referenceOf(best) ?? 0) : 0) ? pull : best,
-    null,
-  );
-  const noRelease = noReleases.length > 0;
-  const noReleaseNm = highest ? referenceOf(highest) : null;
+  const { noRelease, noReleaseNm, deviation } = noReleaseOf(context, pulls);
   if (!limits) {
     return {
       noRelease,
@@ -92,10 +82,10 @@ function judgementOf(
     guard: facts.plan.guard,
     requiredReadings,
     barred: [...new Set([...facts.barred, ...own])],
-    noRelease: highest ? deviationOf(context, highest) : null,
+    noRelease: deviation,
     unmet: [
       ...(input.exerciseMissing && deviations.length > 0 ? ['exercise-missing'] : []),
-      ...(noRelease && !highest ? ['no-release-unproven'] : []),
+      ...(noRelease && deviation === null ? ['no-release-unproven'] : []),
     ],
   });
   return { noRelease, noReleaseNm, ...judged };

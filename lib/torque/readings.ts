@@ -67,3 +67,28 @@ export function meanAtTarget(
   });
   return scaled.length > 0 ? summarise(scaled).mean : null;
 }
+
+/**
+ * What accepted pulls without a release say: the highest torque reached, N·m, and the deviation that
+ * the tool has at least passed. That is null when the pull ended at or below what the tool was set
+ * to, or at no stated torque: such a pull says nothing of the tool.
+ */
+export function noReleaseOf(context: PointContext, pulls: readonly PullFact[]) {
+  const stuck = pulls.filter((pull) => pull.state === 'accepted' && pull.outcome === 'no-release');
+  let highest: PullFact | null = null;
+  let noReleaseNm: number | null = null;
+  for (const pull of stuck) {
+    const referenceNm = referenceOf(pull);
+    if (referenceNm !== null && referenceNm > (noReleaseNm ?? 0)) {
+      highest = pull;
+      noReleaseNm = referenceNm;
+    }
+  }
+  const setNm = highest ? convertTorque(highest.toolValue, context.facts.plan.unit, 'N.m') : 0;
+  const passed = highest !== null && noReleaseNm !== null && noReleaseNm > setNm;
+  return {
+    noRelease: stuck.length > 0,
+    noReleaseNm,
+    deviation: passed && highest ? deviationOf(context, highest) : null,
+  };
+}
