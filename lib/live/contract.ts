@@ -1,7 +1,9 @@
 import { z } from 'zod';
+import type { ToolDescription } from '@/lib/line/join';
 import type { BenchState, TagPlace, TagState } from '@/lib/line/states';
 import type { Direction } from '@/lib/torque/plan';
 import type { VoidFault } from '@/lib/torque/faults';
+import type { PlanSettings } from '@/lib/torque/settings';
 import type { Verdict } from '@/lib/torque/verdict';
 
 // The one contract of the live channel. Snapshots, never patches: a client keeps the newest
@@ -125,6 +127,8 @@ export interface CheckView {
   step: StepView | null;
   /** The oldest value that waits for a decision. */
   offered: PullView | null;
+  /** The step that this value was pulled for; `step` is already the one after it. */
+  offeredStep: StepView | null;
   pulls: PullView[];
   points: CorridorPoint[];
   progress: Progress;
@@ -157,6 +161,9 @@ export interface TagView {
   joinedAt: string;
 }
 
+/** A tag that an operator looked up by its code. */
+export type FoundTag = TagView & { benchNumber: number | null };
+
 export type InstrumentState = 'detached' | 'connecting' | 'ready' | 'lost';
 
 /** `check:{bench}`, staff: everything on the bench but the check itself. */
@@ -168,11 +175,15 @@ export interface BenchSnapshot extends Snapshot {
     pausedReason: string | null;
     operator: { id: string; name: string } | null;
   };
-  meet: { id: string; slug: string; name: string; timeZone: string };
+  meet: { id: string; slug: string; name: string; timeZone: string; plan: PlanSettings };
   tester: {
     id: string;
     name: string;
     maximum: string;
+    /** N·m */
+    minNm: number;
+    /** N·m */
+    maxNm: number;
     kind: 'keyed' | 'simulated' | 'serial';
     certificate: string;
     proof: string;
@@ -181,6 +192,8 @@ export interface BenchSnapshot extends Snapshot {
     instrument: { state: InstrumentState; message: string };
   } | null;
   tag: TagView | null;
+  /** The whole description of the tool that lies here, and its owner's working torques. */
+  tool: (ToolDescription & { workingPoints: number[] | null }) | null;
   called: (TagView & { calledAt: string }) | null;
   next: TagView[];
   waitingCount: number;

@@ -11,7 +11,7 @@ import type { InstrumentManager } from '@/server/instruments/manager';
 import { currentRevision } from '@/server/queries/revision';
 import { certificateWords, proofWords } from '@/server/queries/tester/words';
 import { testerToday } from '@/server/queries/tester/standing';
-import { staffTags, tagView, type StaffTagRow } from './tag-view';
+import { staffTags, tagView, toolOnBench, type StaffTagRow } from './tag-view';
 
 interface BenchScope {
   reader: Reader;
@@ -40,6 +40,8 @@ async function testerOf(scope: BenchScope, testerId: string, meet: typeof meets.
     id: today.tester.id,
     name: today.tester.name,
     maximum: formatTorque(today.tester.maxNm, 'N.m'),
+    minNm: today.tester.minNm,
+    maxNm: today.tester.maxNm,
     kind: today.tester.connection.kind,
     certificate: certificateWords(today.certificate),
     proof: proofWords(today.proof, meet.timeZone),
@@ -118,9 +120,16 @@ export async function benchSnapshot(
       pausedReason: bench.pausedReason,
       operator: head.operator,
     },
-    meet: { id: meet.id, slug: meet.slug, name: meet.name, timeZone: meet.timeZone },
+    meet: {
+      id: meet.id,
+      slug: meet.slug,
+      name: meet.name,
+      timeZone: meet.timeZone,
+      plan: meet.planSettings,
+    },
     tester: bench.testerId ? await testerOf(scope, bench.testerId, meet) : null,
     tag: lying ? tagView(lying) : null,
+    tool: lying ? toolOnBench(lying) : null,
     called: called
       ? { ...tagView(called), calledAt: (called.tag.calledAt ?? called.tag.joinedAt).toISOString() }
       : null,

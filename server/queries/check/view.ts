@@ -99,6 +99,9 @@ export function checkView(
   const index = check.stoppedEarly ? null : evaluation.nextStepIndex;
   const step = index === null ? null : stepView(file, index);
   const pulls = file.pulls.map((one) => pullView(file, one));
+  const offered = pulls.find((pull) => pull.state === 'offered') ?? null;
+  const offeredStep = offered ? stepView(file, offered.stepIndex) : null;
+  const shown = offeredStep ?? step;
   return {
     id: check.id,
     tagCode: file.tag.code,
@@ -110,16 +113,17 @@ export function checkView(
     planName: plan.schemeName,
     barred: factsOf(file).barred.map(reasonWords),
     step,
-    offered: pulls.find((pull) => pull.state === 'offered') ?? null,
+    offered,
+    offeredStep,
     pulls,
     points: evaluation.points.map((point) =>
       corridorPoint(
         point,
         plan,
         division,
-        step?.kind === 'reading' &&
-          step.direction === point.direction &&
-          step.target === point.target,
+        shown?.kind === 'reading' &&
+          shown.direction === point.direction &&
+          shown.target === point.target,
       ),
     ),
     progress: evaluation.progress,
