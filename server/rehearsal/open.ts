@@ -1,0 +1,16 @@
+import type { RunningServer } from '@/server/start';
+import { announcement } from './announce';
+
+export interface Play {
+  stop(): Promise<void>;
+}
+
+/** Prints where everything is and, when asked to, lets simulated visitors in. */
+export async function open(
+  { runtime, port }: RunningServer,
+  { visitors }: { visitors: boolean },
+): Promise<Play> {
+  const { store, secret, origin } = runtime;
+  console.log(await announcement({ db: store.db, secret, origin, port, visitors }));
+  return { stop: async () => undefined };
+}
