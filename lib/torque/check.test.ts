@@ -1,3 +1,4 @@
+import normalCdf from '@stdlib/stats-base-dists-normal-cdf';
 import { describe, expect, it } from 'vitest';
 import { evaluateCheck } from './check';
 import { factsOf, pulled, pullOf, referenceFor } from './check.fixture';
@@ -51,6 +52,17 @@ describe('evaluateCheck, worked out by hand', () => {
       (69.2 * (combined.expanded + 0.2)) / 100,
       12,
     );
+  });
+  it('conformance of the mean at a limit it touches, u widened by 0.2/k', () => {
+    const edge = first(
+      pulled(factsOf(), 6, (target, step) => referenceFor(target, step === 4 ? 3.4 : 3.6)),
+    );
+    const { combined } = edge.budget ?? { combined: { standard: NaN, coverageFactor: NaN } };
+    const standard = combined.standard + 0.2 / combined.coverageFactor;
+    const z = (4 - (edge.summary?.mean ?? NaN)) / standard;
+    expect(edge.conformance).toBeCloseTo(normalCdf(z, 0, 1), 9);
+    expect(z).toBeGreaterThan(0.5);
+    expect(z).toBeLessThan(1);
   });
   it('says what is not in the budget', () => {
     const words = point.notAssessed.join(' ');

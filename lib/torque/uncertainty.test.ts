@@ -16,6 +16,17 @@ describe('combine', () => {
       expect(combine([part(standard, dof)]).effectiveDof).toBe(dof);
     }
   });
+  it('equal components have ν together, which rounding does not eat', () => {
+    for (let count = 2; count <= 12; count += 1) {
+      for (const dof of [1, 2, 3, 4, 9, 14]) {
+        for (const standard of [0.1, 0.3, 1 / 3, 0.7]) {
+          const parts = Array.from({ length: count }, () => part(standard, dof));
+          // (n·u²)² / (n·u⁴/ν) = n·ν
+          expect(combine(parts).effectiveDof).toBe(count * dof);
+        }
+      }
+    }
+  });
   it('truncates ν', () => {
     // (1 + 1)² / (1/4 + 1/5) = 8.89
     expect(combine([part(1, 4), part(1, 5)]).effectiveDof).toBe(8);
