@@ -44,11 +44,11 @@ export const POLICY = {
   'tester.add': LEADS,
   'tester.change': LEADS,
   'tester.lock': LEADS,
-  'tester.unlock': LEADS,
   'certificate.add': LEADS,
   'proof.add': LEADS,
   'staff.add': ['owner'],
   'staff.change': ['owner'],
+  'staff.set-password': ['owner'],
   // Accounts
   'post.set-up': ['public'],
   'session.sign-in': ['public'],

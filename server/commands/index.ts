@@ -1,16 +1,24 @@
 import type { CommandContext } from './command';
+import { addBench } from './bench/add';
+import { setBenchTester } from './bench/set-tester';
 import { closeBench, openBench, pauseBench } from './bench/set-state';
 import { leaveBench } from './bench/leave';
 import { takeBench } from './bench/take';
+import { addCertificate } from './certificate/add';
 import { abandonCheck } from './check/abandon';
 import { addNote } from './check/note';
 import { pauseCheck, resumeCheck } from './check/pause';
 import { signOff } from './check/sign-off';
 import { startCheck } from './check/start';
 import { stopEarly } from './check/stop-early';
+import { changeMeet } from './meet/change';
+import { createMeet } from './meet/create';
+import { changePlan } from './plan/change';
+import { addProof } from './proof/add';
 import { acceptPull } from './pull/accept';
 import { recordPull } from './pull/record';
 import { voidPull } from './pull/void';
+import { changeStaff } from './staff/change';
 import { callTag } from './tag/call';
 import { handBack } from './tag/hand-back';
 import { hangTool } from './tag/hang';
@@ -22,6 +30,9 @@ import { releaseTag } from './tag/release';
 import { returnToLine } from './tag/return-to-line';
 import { takeOnBench } from './tag/take-on-bench';
 import { withdrawTag } from './tag/withdraw';
+import { addTester } from './tester/add';
+import { changeTester } from './tester/change';
+import { lockTester } from './tester/lock';
 
 type FromWire = (ctx: CommandContext, id: string, input: unknown) => Promise<unknown>;
 
@@ -52,6 +63,17 @@ const list: { commandName: string; fromWire: FromWire }[] = [
   releaseTag,
   moveInLine,
   withdrawTag,
+  createMeet,
+  changeMeet,
+  changePlan,
+  addBench,
+  setBenchTester,
+  addTester,
+  changeTester,
+  lockTester,
+  addCertificate,
+  addProof,
+  changeStaff,
 ];
 
 /** The commands that staff screens send to `/api/commands/…`, by name. Each parses its own input. */
