@@ -26,19 +26,35 @@ export interface TestStore {
 
 const TABLES = Object.values(schema)
   .filter((value) => is(value, PgTable))
-  .map((table) => `"${getTableName(table)}"`)
-  .join(', ');
+  .map((table) => getTableName(table));
+
+/**
+ * Empties every table. As a replica no trigger fires, so that append-only tables and foreign keys
+ * let go; a truncate does the same, but takes a tenth of a second.
+ */
+const EMPTY = `do $$ begin
+  set local session_replication_role = replica;
+  ${TABLES.map((name) => `delete from "${name}";`).join(' ')}
+  perform setval(pg_get_serial_sequence('ledger', 'sequence'), 1, false);
+end $$`;
 
 let shared: Promise<TestStore> | null = null;
 
-/** The one migrated in-memory store of this test file. Call `reset()` before each test. */
+/**
+ * The one migrated store of this test file, in memory; with TEST_DATABASE_URL that PostgreSQL database,
+ * which it empties (then run the files one after the other). Call `reset()` before each test.
+ */
 export function testStore(): Promise<TestStore> {
   shared ??= open();
   return shared;
 }
 
 async function open(): Promise<TestStore> {
-  const { db } = await openStore({ kind: 'dump', dump: await storeTemplate() });
+  const { db } = await openStore(
+    process.env.TEST_DATABASE_URL
+      ? { kind: 'postgres', url: process.env.TEST_DATABASE_URL }
+      : { kind: 'dump', dump: await storeTemplate() },
+  );
   const store: TestStore = {
     db,
     published: [],
@@ -51,8 +67,7 @@ async function open(): Promise<TestStore> {
       publish: (events, revision) => void store.published.push({ events, revision }),
     }),
     async reset() {
-      // Append-only tables refuse row by row; a truncate is no row.
-      await db.execute(sql.raw(`truncate table ${TABLES} restart identity cascade`));
+      await db.execute(sql.raw(EMPTY));
       store.published = [];
       store.now = TEST_NOW;
     },
