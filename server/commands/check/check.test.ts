@@ -324,6 +324,7 @@ describe('signing off', () => {
   it('a tool that did not let go is outside, with that torque', async () => {
     const checkId = await start();
     await exercise(checkId);
+    await expect(pull(checkId, 66, { outcome: 'no-release' })).rejects.toThrow('Pull on past 68');
     await pull(checkId, 88, { outcome: 'no-release' });
     await pullAll(checkId, 1);
     expect(await signOff(operator(), uuidv7(), { checkId })).toMatchObject({ verdict: 'outside' });

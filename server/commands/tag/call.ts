@@ -1,6 +1,6 @@
 import { and, eq } from 'drizzle-orm';
 import { z } from 'zod';
-import { tags } from '@/db/schema';
+import { meets, tags } from '@/db/schema';
 import { nextTag } from '@/lib/line/order';
 import { lockBench } from '@/server/commands/bench/shared';
 import { defineCommand } from '@/server/commands/command';
@@ -33,6 +33,8 @@ export const callTag = defineCommand({
     }
     let tagId = input.tagId;
     if (tagId === null) {
+      // Two benches that call the next at once do it one after the other.
+      await tx.select({ id: meets.id }).from(meets).where(eq(meets.id, bench.meetId)).for('update');
       const waiting = await tx
         .select()
         .from(tags)
