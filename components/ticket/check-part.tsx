@@ -1,0 +1,34 @@
+import { Corridor } from '@/components/corridor/corridor';
+import { PullDots } from '@/components/pull-dots';
+import type { TicketSnapshot } from '@/lib/live/contract';
+
+type RunningCheck = NonNullable<TicketSnapshot['check']>;
+
+/** The check as it runs: how far it is, the corridor filling up, and each reading, newest first. */
+export function CheckPart({ check }: { check: RunningCheck }) {
+  const { progress, points, readings, basis } = check;
+  const newest = readings.map((reading, index) => ({ ...reading, number: index + 1 })).reverse();
+  return (
+    <section aria-label="Readings" className="mt-5 flex flex-col gap-4">
+      <PullDots taken={progress.done} total={progress.total} noun="pulls" />
+      <div className="ground-chalk -mx-3 px-3 py-3">
+        <Corridor rows={points} basis={basis} />
+      </div>
+      {newest.length > 0 && (
+        <ol aria-label="Readings, newest first" className="flex flex-col">
+          {newest.map(({ number, label, reference, words }) => (
+            <li
+              key={number}
+              className="border-line flex flex-wrap items-baseline justify-between gap-x-4 border-t py-1.5"
+            >
+              <span>
+                {label}: <span className="font-reading font-bold">{reference}</span>
+              </span>
+              <span className="text-fore-quiet">{words}</span>
+            </li>
+          ))}
+        </ol>
+      )}
+    </section>
+  );
+}
