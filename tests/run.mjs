@@ -60,7 +60,7 @@ count('unit and published tests', unitOk, () => {
   return { passed: report.numPassedTests, failed: report.numFailedTests };
 });
 
-if (part('build', 'npx', ['next', 'build'])) {
+if (part('build', 'node', ['scripts/build.mjs'])) {
   const browserReport = path.join(reports, 'browser.json');
   const browserOk = run('npx', ['playwright', 'test', '--reporter=list,json'], {
     CHROMIUM: chromium,
