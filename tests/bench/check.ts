@@ -8,11 +8,23 @@ import { callTag } from '@/server/commands/tag/call';
 import { takeOnBench } from '@/server/commands/tag/take-on-bench';
 import { callId, type BenchPost } from './post';
 
-/** Calls the first tag, takes it on the bench and starts its check, all by commands. */
-export async function beginCheck(post: BenchPost): Promise<{ checkId: string; plan: CheckPlan }> {
-  const { bench, tag } = post.world;
+export interface CheckPlace {
+  benchId: string;
+  tagId: string;
+}
+
+/** Bench 1 and the first tag. */
+export const firstPlace = ({ world }: BenchPost): CheckPlace => ({
+  benchId: world.bench.id,
+  tagId: world.tag.id,
+});
+
+/** Calls the tag, takes it on the bench and starts its check, all by commands. */
+export async function beginCheck(
+  post: BenchPost,
+  place: CheckPlace = firstPlace(post),
+): Promise<{ checkId: string; plan: CheckPlan }> {
   const { ctx } = post.context();
-  const place = { benchId: bench.id, tagId: tag.id };
   await callTag(ctx, callId(), place);
   await takeOnBench(ctx, callId(), place);
   const { checkId } = await startCheck(ctx, callId(), {
@@ -39,10 +51,13 @@ export async function beginCheck(post: BenchPost): Promise<{ checkId: string; pl
 }
 
 /** Gives the running check up, so that the next one starts empty. */
-export async function endCheck(post: BenchPost): Promise<void> {
+export async function endCheck(
+  post: BenchPost,
+  { tagId }: CheckPlace = firstPlace(post),
+): Promise<void> {
   const { ctx } = post.context();
   await abandonCheck(ctx, callId(), {
-    tagId: post.world.tag.id,
+    tagId,
     to: 'visitor',
     reason: 'The measurement goes on with a fresh check.',
   });

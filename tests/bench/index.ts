@@ -1,10 +1,12 @@
 import { parseArgs } from 'node:util';
 import { measureCall } from './live-call';
 import { measurePull } from './live-pull';
+import { measureSql } from './sql';
 import { say, type Measurement } from './report';
 
 const PARTS: Record<string, () => Promise<Measurement[]>> = {
   live: async () => [await measureCall(), await measurePull()],
+  sql: async () => [await measureSql()],
 };
 
 const { values: flags } = parseArgs({ options: { only: { type: 'string' } } });

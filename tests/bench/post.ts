@@ -1,4 +1,5 @@
 import { createServer } from 'node:http';
+import { PGlite } from '@electric-sql/pglite';
 import { sealData } from 'iron-session';
 import pino from 'pino';
 import { v7 as uuidv7 } from 'uuid';
@@ -17,6 +18,8 @@ export type World = Awaited<ReturnType<typeof makeWorld>>;
 
 export interface BenchPost {
   db: Database;
+  /** The same store without Drizzle. */
+  client: PGlite;
   world: World;
   url: string;
   secret: string;
@@ -55,6 +58,7 @@ export async function openPost({ tags }: { tags: number }): Promise<BenchPost> {
 
   return {
     db,
+    client: clientOf(db),
     world,
     clock,
     operator,
@@ -81,6 +85,12 @@ export async function openPost({ tags }: { tags: number }): Promise<BenchPost> {
       await store.close();
     },
   };
+}
+
+function clientOf(db: Database): PGlite {
+  const client = '$client' in db ? db.$client : null;
+  if (!(client instanceof PGlite)) throw new Error('The store is no PGlite.');
+  return client;
 }
 
 /** The id of one call of a command. */
