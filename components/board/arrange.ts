@@ -6,6 +6,8 @@ export const MAX_CODES = 12;
 const MAX_BENCHES = 4;
 const MAX_NEXT = 4;
 const MAX_THEN = 4;
+/** The last line holds finished tools and the tags after the next; they share its width. */
+const MAX_THEN_BESIDE_READY = 3;
 const MAX_READY = 2;
 
 export interface Call {
@@ -55,8 +57,9 @@ export function arrange(line: LineSnapshot): Arrangement {
   const ready = hasLastLine ? onPegs.slice(0, MAX_READY) : [];
   const room = MAX_CODES - calls.length - lying.length - ready.length;
   const next = line.waiting.slice(0, Math.min(MAX_NEXT, room));
+  const maxThen = ready.length > 0 ? MAX_THEN_BESIDE_READY : MAX_THEN;
   const then = hasLastLine
-    ? line.waiting.slice(next.length, next.length + Math.min(MAX_THEN, room - next.length))
+    ? line.waiting.slice(next.length, next.length + Math.min(maxThen, room - next.length))
     : [];
   return {
     calls,

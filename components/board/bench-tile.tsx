@@ -1,4 +1,5 @@
 import clsx from 'clsx';
+import type { CSSProperties } from 'react';
 import { PullDots } from '@/components/pull-dots';
 import { Tag } from '@/components/tag/tag';
 import type { LineBench } from '@/lib/live/contract';
@@ -33,7 +34,7 @@ export function BenchTile({ bench, isTight }: BenchTileProps) {
           />
         </Moving>
       ) : (
-        <BarePeg isTight={isTight} />
+        <BarePeg capHeight={capHeight} isTight={isTight} />
       )}
       <div className="flex min-w-0 flex-col">
         <h3 className={clsx('text-fore-quiet', css.state)}>Bench {bench.number}</h3>
@@ -71,17 +72,21 @@ function ToolLines({ tool }: { tool: string }) {
 const evenRow = (total: number): number =>
   Math.ceil(total / Math.ceil(Math.max(1, total) / DOTS_A_ROW));
 
-function BarePeg({ isTight }: { isTight: boolean }) {
-  const size = isTight ? 'h-46 w-64' : 'h-56 w-72';
+/** Takes the room of a tag, so that nothing jumps when one is hung up. */
+function BarePeg({ capHeight, isTight }: { capHeight: string; isTight: boolean }) {
   return (
-    <div aria-hidden="true" className={clsx(css.bare, size)}>
-      <span
-        className="tag-peg"
-        style={{
-          ['--tag-hole' as string]: 'calc(11 * var(--u))',
-          ['--tag-hole-y' as string]: 'calc(36 * var(--u))',
-        }}
-      />
+    <div aria-hidden="true" className={css.benchTag}>
+      <div className="tag tag-board tag-hangs" style={{ '--tag-cap': capHeight } as CSSProperties}>
+        <div className={clsx('tag-paper', css.shadow)}>
+          <span className="tag-code font-code font-bold">A00</span>
+          {!isTight && (
+            <span className="tag-line">
+              <ToolLines tool="Click wrench · 60–340 N·m" />
+            </span>
+          )}
+        </div>
+        <span className="tag-peg" />
+      </div>
     </div>
   );
 }
