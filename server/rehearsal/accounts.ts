@@ -1,61 +1,40 @@
-import { randomBytes } from 'node:crypto';
+import { createHmac } from 'node:crypto';
 import { hash } from '@node-rs/argon2';
-import { staff } from '@/db/schema';
-import type { Database } from '@/db/client';
 import type { Role } from '@/lib/line/states';
-import { POST_ID, STAFF_IDS } from './ids';
 
 export interface Account {
-  id: string;
   name: string;
   login: string;
   role: Role;
 }
 
 /** Whom a person may sign in as. Their passwords are printed at every start, so they guard nothing. */
-export const ACCOUNTS: readonly (Account & { password: string })[] = [
-  {
-    id: STAFF_IDS.operator,
+export const ACCOUNTS = {
+  operator: {
     name: 'Perrin Oakes',
     login: 'operator',
     password: 'paddock-operator',
     role: 'operator',
   },
-  {
-    id: STAFF_IDS.lead,
-    name: 'Ilse Marrow',
-    login: 'lead',
-    password: 'paddock-lead',
-    role: 'lead',
-  },
-  {
-    id: STAFF_IDS.owner,
-    name: 'Corin Vale',
-    login: 'owner',
-    password: 'paddock-owner',
-    role: 'owner',
-  },
-];
+  lead: { name: 'Ilse Marrow', login: 'lead', password: 'paddock-lead', role: 'lead' },
+  owner: { name: 'Corin Vale', login: 'owner', password: 'paddock-owner', role: 'owner' },
+} as const satisfies Record<string, Account & { password: string }>;
 
 /** The simulated operators, one for each bench. Nobody can sign in as one of them. */
-export const CREW: readonly Account[] = [
-  { id: STAFF_IDS.crew[0], name: 'Wren Tallis', login: 'crew-1', role: 'operator' },
-  { id: STAFF_IDS.crew[1], name: 'Joss Arkle', login: 'crew-2', role: 'operator' },
-];
+export const CREW = [
+  { name: 'Wren Tallis', login: 'crew-1', role: 'operator' },
+  { name: 'Joss Arkle', login: 'crew-2', role: 'operator' },
+] as const satisfies readonly Account[];
 
-const unknownPassword = (): string => randomBytes(32).toString('base64url');
-
-export async function addAccounts(db: Database, createdAt: Date): Promise<void> {
-  const people = [
-    ...ACCOUNTS,
-    ...CREW.map((member) => ({ ...member, password: unknownPassword() })),
-  ];
-  for (const { password, ...person } of people) {
-    // argon2id is the package's default.
-    const passwordHash = await hash(password);
-    await db
-      .insert(staff)
-      .values({ ...person, postId: POST_ID, passwordHash, createdAt })
-      .onConflictDoNothing();
-  }
+/**
+ * The argon2id hash of a password, with a salt that follows from the post's secret: the same each
+ * time, so that a story that was cut short can be told again.
+ */
+export function hashFor(secret: string, login: string, password: string): Promise<string> {
+  const salt = createHmac('sha256', secret).update(`rehearsal salt\n${login}`).digest();
+  return hash(password, { salt: salt.subarray(0, 16) });
 }
+
+/** A password that nobody knows. */
+export const unknownPassword = (secret: string, login: string): string =>
+  createHmac('sha256', secret).update(`rehearsal password\n${login}`).digest('base64url');

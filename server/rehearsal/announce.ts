@@ -4,7 +4,7 @@ import { verdictWords } from '@/lib/torque/words';
 import type { Database } from '@/db/client';
 import { ACCOUNTS } from './accounts';
 import { printedLinks } from './links';
-import { MEET_SLUG } from './place';
+import { settingOf } from './setting';
 
 interface Where {
   db: Database;
@@ -13,54 +13,56 @@ interface Where {
   origin: string;
   port: number;
   visitors: boolean;
+  /** Does the text go to a terminal that knows colours? */
+  colours: boolean;
 }
 
-const WIDTH = 13;
-const row = (label: string, text: string): string => `  ${label.padEnd(WIDTH)}${text}`;
+const row = (label: string, text: string): string => `  ${label.padEnd(13)}${text}`;
+
+/** A QR code in half blocks; on a terminal black on white whatever its own colours are. */
+async function qrLines(address: string, colours: boolean): Promise<string[]> {
+  const drawn = await drawCode(address, { type: 'utf8', errorCorrectionLevel: 'L', margin: 2 });
+  const lines = drawn.split('\n').filter((line) => line !== '');
+  return lines.map((line) => `  ${colours ? `\x1b[30;107m${line}\x1b[0m` : line}`);
+}
 
 /** Everything that somebody needs to look around in the rehearsal, as lines of text. */
 export async function announcement(where: Where): Promise<string> {
-  const { db, secret, origin, port, visitors } = where;
+  const { db, secret, origin, port, visitors, colours } = where;
   const here = `http://localhost:${port}`;
-  const joinAddress = `${origin}/m/${MEET_SLUG}/join`;
-  const [code, links] = await Promise.all([
-    drawCode(joinAddress, { type: 'utf8', errorCorrectionLevel: 'L', margin: 2 }),
-    printedLinks(db, secret),
-  ]);
+  const { meet, benches } = await settingOf(db);
+  const join = `${origin}/m/${meet.slug}/join`;
+  const { tickets, results } = await printedLinks(db, secret, meet.id);
+  const under = (text: string, path: string): string => `${text}\n${row('', `${here}${path}`)}`;
   return [
     '',
-    '  Pullpost rehearsal: Quillmoor Autumn Meet. Everything in it is made up.',
+    `  Pullpost rehearsal: ${meet.name}. Everything in it is made up.`,
     '',
     row('Here', here),
-    row('Phones', `${joinAddress}   (same network)`),
+    row('Phones', `${join}  (on the same network)`),
     '',
-    code,
-    row('Board', `${here}/m/${MEET_SLUG}/board`),
-    ...links.benches.map(({ number, path }) => row(`Bench ${number}`, `${here}${path}`)),
+    ...(await qrLines(join, colours)),
+    '',
+    row('Board', `${here}/m/${meet.slug}/board`),
+    ...benches.map(({ number, id }) => row(`Bench ${number}`, `${here}/bench/${id}`)),
     row('Desk', `${here}/desk`),
     '',
-    ...ACCOUNTS.map(({ login, password }, index) =>
+    ...Object.values(ACCOUNTS).map(({ login, password }, index) =>
       row(index === 0 ? 'Sign in as' : '', `${login.padEnd(10)}password  ${password}`),
     ),
     '',
-    ...links.tickets.map(({ code: tag, state, path }, index) =>
-      row(
-        index === 0 ? 'Tickets' : '',
-        `${tag} ${stateWords(state)}\n${row('', `${here}${path}`)}`,
-      ),
+    ...tickets.map(({ code, state, path }, index) =>
+      row(index === 0 ? 'Tickets' : '', under(`${code} ${stateWords(state)}`, path)),
     ),
     '',
-    ...links.results.map(({ number, verdict, path }, index) =>
-      row(
-        index === 0 ? 'Results' : '',
-        `${number} ${verdictWords(verdict)}\n${row('', `${here}${path}`)}`,
-      ),
+    ...results.map(({ number, verdict, path }, index) =>
+      row(index === 0 ? 'Results' : '', under(`${number} ${verdictWords(verdict)}`, path)),
     ),
     '',
     visitors
       ? '  Simulated visitors come and go. A bench that somebody takes is left to them.'
       : '  Add --visitors for simulated visitors, --fresh to start over.',
-    '  Ctrl-C ends the rehearsal; it goes on from there the next time.',
+    '  Ctrl-C ends the rehearsal; the next one goes on from there.',
     '',
   ].join('\n');
 }

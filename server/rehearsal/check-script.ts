@@ -10,7 +10,7 @@ import { loadCheckFile, type CheckFile } from '@/server/queries/check/load';
 import type { Actor } from '@/server/access/actor';
 import { CAST, type Name, type Part } from './cast';
 import { makeUpPull } from './readings';
-import { tagOf, type Telling } from './told';
+import { later, tagOf, type Telling } from './told';
 import { TOOLS, type Tool } from './tools';
 import type { CheckTold } from './turns';
 
@@ -22,9 +22,6 @@ interface Place {
 }
 
 type Scene = AsyncGenerator<Date, void, void>;
-
-const later = (telling: Telling, seconds: number): Date =>
-  new Date(telling.stage.clock().getTime() + seconds * 1000);
 
 /** What an operator finds on a sound tool of this kind. */
 export const asFoundOf = (tool: Tool, told: Pick<CheckTold, 'damage' | 'temperatureC'> = {}) => {

@@ -1,15 +1,18 @@
 import type { Runtime } from '@/server/runtime';
+import { openNewDay } from './new-day';
 import { refuseOthers, seed as tellStory } from './seed';
 import { markAsRehearsal } from './start-over';
 
 export { open } from './open';
 export { startOver } from './start-over';
 
-/** Fills an empty store with the made-up meet, and marks its folder as a rehearsal's. */
+/** Fills an empty store with the made-up meet, or opens one of an earlier day again. */
 export async function seed(runtime: Runtime): Promise<void> {
-  await refuseOthers(runtime.store.db);
+  const { store, secret, clock } = runtime;
+  await refuseOthers(store.db);
   markAsRehearsal(runtime.env);
   await tellStory(runtime);
+  await openNewDay({ db: store.db, secret, clock, publish: () => undefined });
   // The owner's account is there, so that nobody else may set the post up.
   runtime.setupCode = null;
 }

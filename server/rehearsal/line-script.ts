@@ -4,18 +4,16 @@ import { joinLine } from '@/server/commands/tag/join';
 import { withdrawTag } from '@/server/commands/tag/withdraw';
 import { CAST, type Name, type Part } from './cast';
 import type { Script } from './director';
-import { MEET_ID, STAFF_IDS } from './ids';
-import { staffActor } from './stage';
-import { tagOf, type Telling } from './told';
+import { ago, tagOf, type Telling } from './told';
 import { TOOLS } from './tools';
 
 async function* partScript(telling: Telling, who: Name, part: Part): Script {
-  yield telling.ago(part.joins);
+  yield ago(telling, part.joins);
   const joined = await telling.run(
     joinLine,
     { kind: 'public' },
     {
-      meetId: MEET_ID,
+      meetId: telling.setting.meet.id,
       tool: TOOLS[part.tool],
       consent: part.workingPoints ? 'working' : 'maximum',
       workingPoints: part.workingPoints ? [...part.workingPoints] : null,
@@ -25,16 +23,16 @@ async function* partScript(telling: Telling, who: Name, part: Part): Script {
   telling.tags.set(who, joined);
   const { tagId } = tagOf(telling, who);
   if (part.leaves) {
-    yield telling.ago(part.joins - 1);
-    await telling.run(hangTool, staffActor(STAFF_IDS.lead), { tagId });
+    yield ago(telling, part.joins - 1);
+    await telling.run(hangTool, telling.setting.lead, { tagId });
   }
   if (part.held) {
-    yield telling.ago(part.held.at);
+    yield ago(telling, part.held.at);
     const { minutes } = part.held;
-    await telling.run(holdTag, staffActor(STAFF_IDS.lead), { tagId, minutes });
+    await telling.run(holdTag, telling.setting.lead, { tagId, minutes });
   }
   if (part.withdraws !== undefined) {
-    yield telling.ago(part.withdraws);
+    yield ago(telling, part.withdraws);
     await telling.run(withdrawTag, { kind: 'visitor', tagId }, { tagId });
   }
 }

@@ -1,30 +1,29 @@
-import { and, asc, desc, eq, ne } from 'drizzle-orm';
-import { benches, records, tags } from '@/db/schema';
+import { and, asc, desc, eq, inArray } from 'drizzle-orm';
+import { records, tags } from '@/db/schema';
 import type { Reader } from '@/db/client';
 import type { TagState } from '@/lib/line/states';
 import type { Verdict } from '@/lib/torque/verdict';
 import { linkToken } from '@/server/access/links';
-import { MEET_ID } from './ids';
 
 export interface PrintedLinks {
-  benches: { number: number; path: string }[];
   tickets: { code: string; state: TagState; path: string }[];
   results: { number: string; verdict: Verdict; path: string }[];
 }
 
-const SHOWN = 4;
+/** The states whose tickets are worth a look, in the order in which they are printed. */
+const TICKET_STATES: TagState[] = ['waiting', 'called', 'on_bench', 'ready'];
+const NEWEST = 50;
 
-/** A ticket of each of some states, and the newest result of each verdict. */
-export async function printedLinks(db: Reader, secret: string): Promise<PrintedLinks> {
-  const bench = await db
-    .select({ id: benches.id, number: benches.number })
-    .from(benches)
-    .where(eq(benches.meetId, MEET_ID))
-    .orderBy(asc(benches.number));
+/** A ticket of each of some states, and the newest result of each verdict, with secret addresses. */
+export async function printedLinks(
+  db: Reader,
+  secret: string,
+  meetId: string,
+): Promise<PrintedLinks> {
   const ticketRows = await db
     .select({ id: tags.id, code: tags.code, state: tags.state, version: tags.linkVersion })
     .from(tags)
-    .where(and(eq(tags.meetId, MEET_ID), ne(tags.state, 'returned')))
+    .where(and(eq(tags.meetId, meetId), inArray(tags.state, TICKET_STATES)))
     .orderBy(asc(tags.position));
   const recordRows = await db
     .select({
@@ -34,16 +33,17 @@ export async function printedLinks(db: Reader, secret: string): Promise<PrintedL
       version: records.linkVersion,
     })
     .from(records)
-    .where(eq(records.meetId, MEET_ID))
+    .where(eq(records.meetId, meetId))
     .orderBy(desc(records.signedAt))
-    .limit(50);
+    .limit(NEWEST);
   return {
-    benches: bench.map(({ id, number }) => ({ number, path: `/bench/${id}` })),
-    tickets: firstOfEach(ticketRows, ({ state }) => state).map(({ id, code, state, version }) => ({
-      code,
-      state,
-      path: `/t/${linkToken(secret, 'ticket', id, version)}`,
-    })),
+    tickets: firstOfEach(ticketRows, ({ state }) => state)
+      .sort((one, other) => TICKET_STATES.indexOf(one.state) - TICKET_STATES.indexOf(other.state))
+      .map(({ id, code, state, version }) => ({
+        code,
+        state,
+        path: `/t/${linkToken(secret, 'ticket', id, version)}`,
+      })),
     results: firstOfEach(recordRows, ({ verdict }) => verdict).map((row) => ({
       number: row.number,
       verdict: row.verdict,
@@ -55,5 +55,5 @@ export async function printedLinks(db: Reader, secret: string): Promise<PrintedL
 function firstOfEach<Row>(rows: readonly Row[], kindOf: (row: Row) => string): Row[] {
   const byKind = new Map<string, Row>();
   for (const row of rows) if (!byKind.has(kindOf(row))) byKind.set(kindOf(row), row);
-  return [...byKind.values()].slice(0, SHOWN);
+  return [...byKind.values()];
 }

@@ -11,6 +11,7 @@ export async function open(
   { visitors }: { visitors: boolean },
 ): Promise<Play> {
   const { store, secret, origin } = runtime;
-  console.log(await announcement({ db: store.db, secret, origin, port, visitors }));
+  const colours = process.stdout.isTTY === true;
+  console.log(await announcement({ db: store.db, secret, origin, port, visitors, colours }));
   return { stop: async () => undefined };
 }

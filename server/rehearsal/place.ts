@@ -1,10 +1,10 @@
-import { benches, meets, posts } from '@/db/schema';
-import type { Database } from '@/db/client';
+import { slugOf } from '@/lib/desk/slug';
 import { serviceDay } from '@/lib/time/service-day';
-import { DEFAULT_PLAN_SETTINGS } from '@/lib/torque/settings';
-import { BENCH_IDS, MEET_ID, POST_ID, TESTER_IDS } from './ids';
 
-export const MEET_SLUG = 'quillmoor';
+export const POST = { name: 'Hollin Bench', shortName: 'HB' };
+
+const NAME = 'Quillmoor Autumn Meet';
+export const MEET_SLUG = slugOf(NAME);
 const TIME_ZONE = 'Europe/London';
 const MS_A_DAY = 86_400_000;
 
@@ -23,38 +23,21 @@ export function dayStartHour(now: Date): number {
   return hour >= 4 && hour < 9 ? 0 : 4;
 }
 
-export async function addPost(db: Database, createdAt: Date): Promise<void> {
-  await db
-    .insert(posts)
-    .values({ id: POST_ID, name: 'Hollin Bench', shortName: 'HB', createdAt })
-    .onConflictDoNothing();
+/** The meet as it stands on its first form: today and tomorrow. */
+export function meetDetails(now: Date) {
+  const startHour = dayStartHour(now);
+  return {
+    name: NAME,
+    place: 'Quillmoor paddock',
+    startsOn: serviceDay(now, TIME_ZONE, startHour),
+    endsOn: serviceDay(new Date(now.getTime() + MS_A_DAY), TIME_ZONE, startHour),
+    timeZone: TIME_ZONE,
+  };
 }
 
-/** A meet of today and tomorrow with two benches, a tester on each. */
-export async function addMeet(db: Database, now: Date, createdAt: Date): Promise<void> {
-  const startHour = dayStartHour(now);
-  await db
-    .insert(meets)
-    .values({
-      id: MEET_ID,
-      postId: POST_ID,
-      slug: MEET_SLUG,
-      name: 'Quillmoor Autumn Meet',
-      place: 'Quillmoor paddock',
-      startsOn: serviceDay(now, TIME_ZONE, startHour),
-      endsOn: serviceDay(new Date(now.getTime() + MS_A_DAY), TIME_ZONE, startHour),
-      timeZone: TIME_ZONE,
-      dayStartHour: startHour,
-      latitudeDeg: 54.6,
-      heightM: 212,
-      planSettings: DEFAULT_PLAN_SETTINGS,
-      createdAt,
-    })
-    .onConflictDoNothing();
-  for (const [index, id] of BENCH_IDS.entries()) {
-    await db
-      .insert(benches)
-      .values({ id, meetId: MEET_ID, number: index + 1, testerId: TESTER_IDS[index] })
-      .onConflictDoNothing();
-  }
-}
+/** What the first form of a meet does not ask for. */
+export const siteDetails = (now: Date) => ({
+  latitudeDeg: 54.6,
+  heightM: 212,
+  dayStartHour: dayStartHour(now),
+});

@@ -1,32 +1,42 @@
-import { eq, ne } from 'drizzle-orm';
-import { commandRuns, posts } from '@/db/schema';
+import { asc, eq } from 'drizzle-orm';
+import { commandRuns, ledger, posts } from '@/db/schema';
 import type { Database } from '@/db/client';
 import { mulberry32 } from '@/lib/signal/random';
-import type { Runtime } from '@/server/runtime';
 import { openBench } from '@/server/commands/bench/set-state';
-import { addAccounts, CREW } from './accounts';
+import type { Runtime } from '@/server/runtime';
 import { benchScripts } from './bench-script';
 import { direct, storyClock } from './director';
-import { BENCH_IDS, CURTAIN, POST_ID } from './ids';
+import { CURTAIN } from './ids';
 import { lineScripts } from './line-script';
-import { addMeet, addPost } from './place';
-import { proofScripts } from './proofs';
-import { as, staffActor } from './stage';
-import { telling } from './told';
-import { addTesters } from './testers';
+import { POST } from './place';
+import { proofScripts } from './proof-script';
+import { setUp } from './set-up';
+import { fixedIds, runner, type Stage } from './stage';
+import type { Telling } from './told';
 
 const SEED = 20_260_613;
-/** Minutes before the rehearsal opens at which the post was set up. */
-const SET_UP_AT = 175;
+/** How long before the rehearsal opens the post was set up, in milliseconds. */
+const STORY_MS = 175 * 60_000;
 
 /** @throws Error when the store holds somebody's own post. */
 export async function refuseOthers(db: Database): Promise<void> {
-  const [other] = await db.select({ name: posts.name }).from(posts).where(ne(posts.id, POST_ID));
+  const others = await db.select({ name: posts.name }).from(posts);
+  const other = others.find(({ name }) => name !== POST.name);
   if (!other) return;
   throw new Error(
     `The configuration cannot be used for a rehearsal: this store belongs to the post ${other.name}. ` +
       'Set PULLPOST_DATA to another folder, or leave it out.',
   );
+}
+
+/** When the story opens: now, unless one that was cut short had begun. */
+async function openingOf(db: Database, now: Date): Promise<Date> {
+  const [first] = await db
+    .select({ at: ledger.at })
+    .from(ledger)
+    .orderBy(asc(ledger.sequence))
+    .limit(1);
+  return first ? new Date(first.at.getTime() + STORY_MS) : now;
 }
 
 /**
@@ -42,17 +52,16 @@ export async function seed(runtime: Pick<Runtime, 'store' | 'secret' | 'clock'>)
     .where(eq(commandRuns.id, CURTAIN));
   if (told) return;
 
-  const opened = runtime.clock();
-  const setUpAt = new Date(opened.getTime() - SET_UP_AT * 60_000);
-  await addPost(db, setUpAt);
-  await addAccounts(db, setUpAt);
-  await addTesters(db, setUpAt);
-  await addMeet(db, opened, setUpAt);
-
-  const clock = storyClock(setUpAt);
+  const opened = await openingOf(db, runtime.clock());
+  const clock = storyClock(new Date(opened.getTime() - STORY_MS));
   // Nobody listens yet, so nothing is published.
-  const stage = { db, secret: runtime.secret, clock: clock.now, publish: () => undefined };
-  const story = telling(stage, mulberry32(SEED), opened);
+  const stage: Stage = { db, secret: runtime.secret, clock: clock.now, publish: () => undefined };
+  const run = runner(stage, fixedIds());
+  const setting = await setUp(stage, run, opened);
+  const random = mulberry32(SEED);
+  const story: Telling = { stage, run, setting, random, opened, tags: new Map() };
   await direct([...proofScripts(story), ...lineScripts(story), ...benchScripts(story)], clock);
-  await openBench(as(stage, staffActor(CREW[0]!.id)), CURTAIN, { benchId: BENCH_IDS[0] });
+  await openBench({ ...stage, actor: setting.lead }, CURTAIN, {
+    benchId: setting.benches[0]!.id,
+  });
 }
