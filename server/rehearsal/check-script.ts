@@ -5,13 +5,13 @@ import { stopEarly } from '@/server/commands/check/stop-early';
 import { acceptPull } from '@/server/commands/pull/accept';
 import { recordPull } from '@/server/commands/pull/record';
 import { voidPull } from '@/server/commands/pull/void';
-import { isSettingTool } from '@/lib/torque/tool';
 import { loadCheckFile, type CheckFile } from '@/server/queries/check/load';
 import type { Actor } from '@/server/access/actor';
+import { asFoundOf } from './as-found';
 import { CAST, type Name, type Part } from './cast';
 import { makeUpPull } from './readings';
 import { later, tagOf, type Telling } from './told';
-import { TOOLS, type Tool } from './tools';
+import { TOOLS } from './tools';
 import type { CheckTold } from './turns';
 
 const SECONDS_A_PULL = 14;
@@ -22,22 +22,6 @@ interface Place {
 }
 
 type Scene = AsyncGenerator<Date, void, void>;
-
-/** What an operator finds on a sound tool of this kind. */
-export const asFoundOf = (tool: Tool, told: Pick<CheckTold, 'damage' | 'temperatureC'> = {}) => {
-  const setting = isSettingTool(tool.toolClass);
-  const electronic = tool.toolClass === 'I-C' || tool.toolClass === 'I-E';
-  return {
-    settingFound: setting ? (tool.nominal ?? tool.rangeMin) : null,
-    damage: told.damage ?? '',
-    battery: electronic ? ('good' as const) : ('not-fitted' as const),
-    zeroShown: setting ? null : true,
-    scale: tool.unit === 'lbf.ft' ? 'lbf·ft scale' : 'N·m scale',
-    head: 'Ratchet head, as supplied',
-    testerMode: setting ? ('first-peak' as const) : ('live' as const),
-    temperatureC: told.temperatureC ?? 19.5,
-  };
-};
 
 /** One pull: offered by the tester and accepted, or typed, as the tester of the bench has it. */
 async function pullOnce(

@@ -1,5 +1,6 @@
 import type { RunningServer } from '@/server/start';
 import { announcement } from './announce';
+import { startVisitors } from './play';
 
 export interface Play {
   stop(): Promise<void>;
@@ -13,5 +14,5 @@ export async function open(
   const { store, secret, origin } = runtime;
   const colours = process.stdout.isTTY === true;
   console.log(await announcement({ db: store.db, secret, origin, port, visitors, colours }));
-  return { stop: async () => undefined };
+  return visitors ? startVisitors(runtime) : { stop: async () => undefined };
 }
