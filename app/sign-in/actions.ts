@@ -5,7 +5,7 @@ import { redirect } from 'next/navigation';
 import { v7 as uuidv7 } from 'uuid';
 import { ownPath } from '@/lib/desk/own-path';
 import { staffSession } from '@/server/access/current';
-import { homeOf } from '@/server/access/for-page';
+import { homeOf } from '@/server/access/home';
 import { checkPassword } from '@/server/access/sign-in';
 import { signIn } from '@/server/commands/session/sign-in';
 import { problemOf } from '@/server/edge';

@@ -2,7 +2,7 @@ import type { Metadata } from 'next';
 import { redirect } from 'next/navigation';
 import { ownPath } from '@/lib/desk/own-path';
 import { currentStaff } from '@/server/access/current';
-import { homeOf } from '@/server/access/for-page';
+import { homeOf } from '@/server/access/home';
 import { isSetUp } from '@/server/queries/staff/any';
 import { getRuntime } from '@/server/runtime';
 import { SignInForm } from './_components/sign-in-form';

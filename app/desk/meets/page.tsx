@@ -2,14 +2,14 @@ import type { Metadata } from 'next';
 import { AdminPage } from '@/components/desk/admin/admin-page';
 import { MeetsTable } from '@/components/desk/admin/meets-table';
 import { ButtonLink } from '@/components/ui/button';
-import { staffForPage } from '@/server/access/for-page';
 import { meetList } from '@/server/queries/meets/list';
 import { getRuntime } from '@/server/runtime';
+import { enterDesk } from '../enter';
 
 export const metadata: Metadata = { title: 'Meets' };
 
 export default async function MeetsPage() {
-  await staffForPage('read.desk', '/desk/meets');
+  await enterDesk('/desk/meets');
   const { store, clock } = getRuntime();
   return (
     <AdminPage title="Meets" aside={<ButtonLink href="/desk/meets/new">New meet</ButtonLink>}>

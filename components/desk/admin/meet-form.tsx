@@ -20,10 +20,10 @@ export function NewMeetForm({ defaults, timeZones }: { defaults: NewMeet; timeZo
     resolver: zodResolver(newMeetSchema),
     defaultValues: defaults,
   });
-  const sending = useSendCommand<NewMeet, z.output<typeof newMeetSchema>, { meetId: string }>(
+  const sending = useSendCommand<NewMeet, z.output<typeof newMeetSchema>, { slug: string }>(
     form,
     'meet.create',
-    { done: ({ meetId }) => router.push(`/desk/benches?meet=${meetId}`) },
+    { done: ({ slug }) => router.push(`/desk/benches?meet=${slug}`) },
   );
   const field = fieldsOf(form);
   return (

@@ -5,6 +5,7 @@ import { SortedTable, type DeskColumn } from './sorted-table';
 
 interface MeetLine {
   id: string;
+  slug: string;
   name: string;
   place: string;
   startsOn: string;
@@ -57,7 +58,7 @@ const columns: DeskColumn<MeetLine>[] = [
     header: 'Benches',
     enableSorting: false,
     cell: ({ row: { original: meet } }) => (
-      <Link href={`/desk/benches?meet=${meet.id}`} className="underline underline-offset-4">
+      <Link href={`/desk/benches?meet=${meet.slug}`} className="underline underline-offset-4">
         {meet.benches === 1 ? '1 bench' : `${meet.benches} benches`}
       </Link>
     ),

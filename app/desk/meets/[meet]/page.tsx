@@ -5,15 +5,15 @@ import { JoinSwitch } from '@/components/desk/admin/join-switch';
 import { MeetForm } from '@/components/desk/admin/meet-form';
 import { Panel } from '@/components/ui/panel';
 import { timeZoneNames } from '@/lib/desk/time-zones';
-import { staffForPage } from '@/server/access/for-page';
 import { meetDetails } from '@/server/queries/meets/details';
 import { getRuntime } from '@/server/runtime';
+import { enterDesk } from '../../enter';
 
 export const metadata: Metadata = { title: 'Meet' };
 
 export default async function MeetPage({ params }: { params: Promise<{ meet: string }> }) {
   const { meet: meetId } = await params;
-  await staffForPage('meet.change', `/desk/meets/${meetId}`);
+  await enterDesk(`/desk/meets/${meetId}`, 'meet.change');
   const meet = await meetDetails(getRuntime().store.db, meetId);
   if (!meet) notFound();
   const { id, slug, joinOpen, plan: _, ...details } = meet;
@@ -39,12 +39,12 @@ export default async function MeetPage({ params }: { params: Promise<{ meet: str
                 </a>
               </li>
               <li>
-                <a className={link} href={`/desk/benches?meet=${id}`}>
+                <a className={link} href={`/desk/benches?meet=${slug}`}>
                   Benches
                 </a>
               </li>
               <li>
-                <a className={link} href={`/desk/plans?meet=${id}`}>
+                <a className={link} href={`/desk/plans?meet=${slug}`}>
                   Check plan
                 </a>
               </li>

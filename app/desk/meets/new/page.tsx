@@ -3,14 +3,14 @@ import { AdminPage } from '@/components/desk/admin/admin-page';
 import { NewMeetForm } from '@/components/desk/admin/meet-form';
 import { timeZoneNames } from '@/lib/desk/time-zones';
 import { serviceDay } from '@/lib/time/service-day';
-import { staffForPage } from '@/server/access/for-page';
 import { currentMeet } from '@/server/queries/meets/list';
 import { getRuntime } from '@/server/runtime';
+import { enterDesk } from '../../enter';
 
 export const metadata: Metadata = { title: 'New meet' };
 
 export default async function NewMeetPage() {
-  await staffForPage('meet.create', '/desk/meets/new');
+  await enterDesk('/desk/meets/new', 'meet.create');
   const { store, clock } = getRuntime();
   const last = await currentMeet(store.db, clock());
   const timeZone = last?.timeZone ?? Intl.DateTimeFormat().resolvedOptions().timeZone;
