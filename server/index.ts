@@ -29,7 +29,11 @@ async function main(): Promise<void> {
     NODE_ENV: flags.dev ? 'development' : 'production',
     NEXT_TELEMETRY_DISABLED: '1',
   });
-  if (flags.rehearsal) process.env.PULLPOST_DATA ??= '.data/rehearsal';
+  if (flags.rehearsal) {
+    process.env.PULLPOST_DATA ??= '.data/rehearsal';
+    // What is printed for people should not drown in the log.
+    process.env.LOG_LEVEL ||= 'warn';
+  }
   const { readEnv } = await import('./env');
   let dataDir = process.env.PULLPOST_DATA ?? '.data/post';
   try {

@@ -11,6 +11,9 @@ export async function seed(runtime: Runtime): Promise<void> {
   const { store, secret, clock } = runtime;
   await refuseOthers(store.db);
   markAsRehearsal(runtime.env);
+  if (runtime.setupCode !== null) {
+    console.log('\n  Setting up a made-up meet. This takes some seconds, once.');
+  }
   await tellStory(runtime);
   await openNewDay({ db: store.db, secret, clock, publish: () => undefined });
   // The owner's account is there, so that nobody else may set the post up.

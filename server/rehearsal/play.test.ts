@@ -46,21 +46,25 @@ describe('simulated visitors', () => {
     throw new Error('It did not happen within an hour.');
   }
 
-  it('carry a tag from waiting through its check to its owner, and sign a record', async () => {
-    expect(await stateOf('A20')).toBe('waiting');
-    const seen = new Set<string>();
-    await until(async () => {
-      const state = await stateOf('A20');
-      seen.add(state);
-      return state === 'returned';
-    });
-    expect([...seen]).toEqual(
-      expect.arrayContaining(['waiting', 'called', 'on_bench', 'ready', 'returned']),
-    );
-    const [tag] = await store.db.select().from(tags).where(eq(tags.code, 'A20'));
-    const signed = await store.db.select().from(records).where(eq(records.tagId, tag!.id));
-    expect(signed).toHaveLength(1);
-  }, STORY_MS);
+  it(
+    'carry a tag from waiting through its check to its owner, and sign a record',
+    async () => {
+      expect(await stateOf('A20')).toBe('waiting');
+      const seen = new Set<string>();
+      await until(async () => {
+        const state = await stateOf('A20');
+        seen.add(state);
+        return state === 'returned';
+      });
+      expect([...seen]).toEqual(
+        expect.arrayContaining(['waiting', 'called', 'on_bench', 'ready', 'returned']),
+      );
+      const [tag] = await store.db.select().from(tags).where(eq(tags.code, 'A20'));
+      const signed = await store.db.select().from(records).where(eq(records.tagId, tag!.id));
+      expect(signed).toHaveLength(1);
+    },
+    STORY_MS,
+  );
 
   it('join, but never make the line longer than it may be', async () => {
     const newest = async () =>

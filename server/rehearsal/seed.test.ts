@@ -161,32 +161,40 @@ describe('the rehearsal’s story', () => {
     expect(await storyOf(store)).toEqual(before);
   });
 
-  it('is the same in every rehearsal', async () => {
-    const other = await freshStore();
-    await seedAt(other);
-    expect(await storyOf(other)).toEqual(await storyOf(store));
-    await other.close();
-  }, STORY_MS);
+  it(
+    'is the same in every rehearsal',
+    async () => {
+      const other = await freshStore();
+      await seedAt(other);
+      expect(await storyOf(other)).toEqual(await storyOf(store));
+      await other.close();
+    },
+    STORY_MS,
+  );
 
-  it('goes on where it was cut short, without doing anything twice', async () => {
-    const other = await freshStore();
-    let commands = 0;
-    const cut = Object.create(other.db, {
-      transaction: {
-        value: (...args: Parameters<typeof other.db.transaction>) => {
-          commands += 1;
-          if (commands > 150) throw new Error('power cut');
-          return other.db.transaction(...args);
+  it(
+    'goes on where it was cut short, without doing anything twice',
+    async () => {
+      const other = await freshStore();
+      let commands = 0;
+      const cut = Object.create(other.db, {
+        transaction: {
+          value: (...args: Parameters<typeof other.db.transaction>) => {
+            commands += 1;
+            if (commands > 150) throw new Error('power cut');
+            return other.db.transaction(...args);
+          },
         },
-      },
-    });
-    await expect(
-      seed({ store: { ...other, db: cut }, secret: SECRET, clock: () => NOW }),
-    ).rejects.toThrow('power cut');
-    await seedAt(other, new Date(NOW.getTime() + 60_000));
-    expect(await storyOf(other)).toEqual(await storyOf(store));
-    await other.close();
-  }, STORY_MS);
+      });
+      await expect(
+        seed({ store: { ...other, db: cut }, secret: SECRET, clock: () => NOW }),
+      ).rejects.toThrow('power cut');
+      await seedAt(other, new Date(NOW.getTime() + 60_000));
+      expect(await storyOf(other)).toEqual(await storyOf(store));
+      await other.close();
+    },
+    STORY_MS,
+  );
 
   it('opens again on a later day, with its testers proved and its meet still on', async () => {
     const later = new Date(NOW.getTime() + 5 * 86_400_000);
