@@ -13,6 +13,7 @@ import type { LiveEvent } from './events';
 import { createLineChannel } from './line-channel';
 import { rooms } from './rooms';
 import { createThrottle } from './throttle';
+import { atOnce, createTurns } from './turns';
 
 export type LiveServer = Server<ClientToServer, ServerToClient>;
 
@@ -46,15 +47,21 @@ export function createHub(options: HubOptions): LiveHub {
   const listeners: ((event: LiveEvent) => void)[] = [];
   const onError = (error: unknown) => logger.error({ err: error }, 'a live snapshot failed');
 
+  const inTurn = shared ? atOnce : createTurns();
+  // Who is connected to another process is not known here.
+  const watched = (room: string) => shared || (io?.sockets.adapter.rooms.has(room) ?? false);
+
   const line = createLineChannel({
-    read: (meetId) => lineSnapshot(db, meetId, clock()),
+    watched: (meetId) => watched(rooms.line(meetId)),
+    read: (meetId) => inTurn(() => lineSnapshot(db, meetId, clock())),
     emit: (snapshot) => io?.to(rooms.line(snapshot.meetId)).emit('line:changed', snapshot),
     onError,
     shared,
   });
   const desk = createThrottle<string>(
     async (meetId) => {
-      const snapshot = await deskSnapshot(db, meetId, clock());
+      if (!watched(rooms.desk(meetId))) return;
+      const snapshot = await inTurn(() => deskSnapshot(db, meetId, clock()));
       if (snapshot) io?.to(rooms.desk(meetId)).emit('desk:changed', snapshot);
     },
     500,
@@ -62,9 +69,9 @@ export function createHub(options: HubOptions): LiveHub {
   );
   const bench = createThrottle<string>(
     async (benchId) => {
-      const snapshot = await benchSnapshot(
-        { reader: db, now: clock(), secret, instruments: instruments() },
-        benchId,
+      if (!watched(rooms.check(benchId))) return;
+      const snapshot = await inTurn(() =>
+        benchSnapshot({ reader: db, now: clock(), secret, instruments: instruments() }, benchId),
       );
       if (snapshot) io?.to(rooms.check(benchId)).emit('bench:changed', snapshot);
     },
@@ -73,7 +80,8 @@ export function createHub(options: HubOptions): LiveHub {
   );
   const ticket = createThrottle<string>(
     async (tagId) => {
-      const snapshot = await ticketSnapshot(db, tagId, clock(), secret);
+      if (!watched(rooms.ticket(tagId))) return;
+      const snapshot = await inTurn(() => ticketSnapshot(db, tagId, clock(), secret));
       if (snapshot) io?.to(rooms.ticket(tagId)).emit('ticket:changed', snapshot);
     },
     100,
@@ -83,9 +91,7 @@ export function createHub(options: HubOptions): LiveHub {
   function one(event: LiveEvent, revision: number): void {
     switch (event.kind) {
       case 'line':
-        line.changed(event.meetId);
-        desk.poke(event.meetId);
-        return;
+        return line.changed(event.meetId);
       case 'tag':
         return ticket.poke(event.tagId);
       case 'bench':
@@ -101,7 +107,6 @@ export function createHub(options: HubOptions): LiveHub {
           ticketOfFile(file, check, { revision, at }),
         );
         line.progressed(file.tag.meetId, progressOf(file.check.benchId, check, { revision, at }));
-        desk.poke(file.tag.meetId);
         return;
       }
       case 'check-ended': {
@@ -122,6 +127,11 @@ export function createHub(options: HubOptions): LiveHub {
       for (const event of events) {
         one(event, revision);
         for (const listener of listeners) listener(event);
+      }
+      // The desk reads the most; it comes after those who wait for their turn.
+      for (const event of events) {
+        if (event.kind === 'line') desk.poke(event.meetId);
+        if (event.kind === 'check') desk.poke(event.file.tag.meetId);
       }
     },
     instrumentChanged(testerId) {

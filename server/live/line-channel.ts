@@ -6,6 +6,8 @@ import { createThrottle } from './throttle';
 const LINE_WINDOW_MS = 500;
 
 interface LineChannelOptions {
+  /** Does anybody look at this line? What nobody sees is not read. */
+  watched: (meetId: string) => boolean;
   read: (meetId: string) => Promise<LineSnapshot | null>;
   emit: (snapshot: LineSnapshot) => void;
   onError: (error: unknown) => void;
@@ -17,13 +19,14 @@ interface LineChannelOptions {
  * The line of each meet as it was last shown. A change of the line is read again; a reading on a
  * bench only moves that bench's progress in what was shown, so that it costs no read.
  */
-export function createLineChannel({ read, emit, onError, shared }: LineChannelOptions) {
+export function createLineChannel({ watched, read, emit, onError, shared }: LineChannelOptions) {
   const shown = new Map<string, LineSnapshot>();
   const stale = new Set<string>();
   const reading = new Set<string>();
 
   const throttle = createThrottle<string>(
     async (meetId) => {
+      if (!watched(meetId)) return void stale.add(meetId);
       if (shared || stale.has(meetId) || !shown.has(meetId)) {
         stale.delete(meetId);
         reading.add(meetId);

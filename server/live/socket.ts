@@ -91,9 +91,13 @@ export function createSocketServer(options: SocketOptions): {
       const now = clock();
       switch (input.room) {
         case 'line': {
-          const snapshot = await lineSnapshot(db, input.meetId, now);
-          if (!snapshot) throw new Problem('not-found', 'There is no such meet.');
+          // In the room before the read: a change in between reaches it either way.
           await socket.join(rooms.line(input.meetId));
+          const snapshot = await lineSnapshot(db, input.meetId, now);
+          if (!snapshot) {
+            await socket.leave(rooms.line(input.meetId));
+            throw new Problem('not-found', 'There is no such meet.');
+          }
           socket.emit('line:changed', snapshot);
           return;
         }
