@@ -1,0 +1,70 @@
+import type { CheckView } from '@/lib/live/contract';
+import type { BenchAction } from '../keys';
+import type { CheckPanel } from './check-panels';
+import type { EntryNeeds } from './entry';
+
+interface PullActionsInput {
+  check: Pick<CheckView, 'offered' | 'paused' | 'pulls' | 'setting' | 'step'>;
+  needs: EntryNeeds | null;
+  entry: { doubt: string | null; submit: () => void; retype: () => void; pending: boolean };
+  isSimulated: boolean;
+  /** The tester sends its values without being typed. */
+  sendsItself: boolean;
+  typesInstead: boolean;
+  busy: boolean;
+  open: (panel: CheckPanel) => void;
+  onPause: () => void;
+  onSimulate: () => void;
+  onTypeInstead: () => void;
+}
+
+/** Everything that can be done in the middle of the pulls, in the order of the key bar. */
+export function pullActions(input: PullActionsInput): BenchAction[] {
+  const { check, needs, entry, busy, open } = input;
+  const isReading = check.step?.kind === 'reading' && !check.offered;
+  const actions: (BenchAction | false)[] = [
+    needs !== null && {
+      key: 'enter',
+      label: entry.doubt !== null ? 'take it all the same' : needs.verb,
+      run: entry.submit,
+      disabled: entry.pending,
+    },
+    {
+      key: 'v',
+      label: check.offered ? 'void' : 'void last',
+      run: () => open({ kind: 'void', pullId: null }),
+      disabled: check.pulls.every(({ state }) => state === 'voided'),
+    },
+    check.setting &&
+      isReading && {
+        key: 'r',
+        label: 'did not let go',
+        run: () => open({ kind: 'no-release' }),
+        disabled: check.paused,
+      },
+    input.isSimulated && {
+      key: 's',
+      label: 'simulate',
+      run: input.onSimulate,
+      disabled: busy || check.paused,
+    },
+    input.sendsItself && {
+      key: 't',
+      label: input.typesInstead ? 'tester sends' : 'type it',
+      run: input.onTypeInstead,
+    },
+    { key: 'n', label: 'note', run: () => open({ kind: 'note' }) },
+    {
+      key: 'p',
+      label: check.paused ? 'go on' : 'pause',
+      run: input.onPause,
+      disabled: busy,
+    },
+    entry.doubt !== null
+      ? { key: 'escape', label: 'retype', run: entry.retype }
+      : { key: 'escape', label: 'stop early', run: () => open({ kind: 'stop' }) },
+    { key: 'a', label: 'give up', run: () => open({ kind: 'abandon' }) },
+    { key: '?', label: 'all keys', run: () => open({ kind: 'keys' }), atEnd: true },
+  ];
+  return actions.filter((action) => action !== false);
+}

@@ -1,0 +1,123 @@
+'use client';
+
+import { useEffect, useRef, useState } from 'react';
+import type { CheckView } from '@/lib/live/contract';
+import type { acceptPullSchema, RecordPullInput } from '@/lib/record/pull-input';
+import type { TorqueUnit } from '@/lib/torque/units';
+import type { z } from 'zod';
+import type { CommandError } from '../../live/use-command';
+import { isUnanswered, useSteadyCommand } from '../use-steady-command';
+import { readEntry, type EntryErrors, type EntryNeeds, type EntryText } from './entry';
+
+type AcceptPullInput = z.input<typeof acceptPullSchema>;
+
+const EMPTY: EntryText = { value: '', toolValue: '' };
+
+export interface Entry {
+  text: EntryText;
+  type: (field: keyof EntryText, typed: string) => void;
+  /** Takes what stands there; again after a question means yes. */
+  submit: () => void;
+  /** Empties the fields and forgets the question. */
+  retype: () => void;
+  errors: EntryErrors;
+  /** The question of the post about a value that looks mistyped. */
+  doubt: string | null;
+  pending: boolean;
+  /** Sent, and no answer came: the fields stay as they are until one does. */
+  unanswered: boolean;
+  /** Refused for a reason that belongs to no field. */
+  refusal: CommandError | null;
+}
+
+interface EntryOptions {
+  check: CheckView;
+  needs: EntryNeeds | null;
+  unit: TorqueUnit;
+  connected: boolean;
+  /** A pull was taken, and the fields are empty again. */
+  onTaken: () => void;
+}
+
+/** The values of the pull in hand, from typing to the answer of the post. */
+export function useEntry({ check, needs, unit, connected, onTaken }: EntryOptions): Entry {
+  const [text, setText] = useState(EMPTY);
+  const [errors, setErrors] = useState<EntryErrors>({});
+  const [decided, setDecided] = useState<string | null>(null);
+  const record = useSteadyCommand<RecordPullInput>('pull.record');
+  const accept = useSteadyCommand<AcceptPullInput>('pull.accept');
+  const last = useRef<'record' | 'accept'>('record');
+
+  const error = record.error ?? accept.error;
+  const doubt = error?.problem.code === 'confirm' ? error.problem.detail : null;
+  const unanswered = isUnanswered(error);
+  const isSettled = decided !== null && decided === check.offered?.id;
+  const pending = record.isPending || accept.isPending || isSettled;
+
+  const forget = () => {
+    record.reset();
+    accept.reset();
+    setErrors({});
+  };
+  const taken = () => {
+    setText(EMPTY);
+    forget();
+    onTaken();
+  };
+  const sendRecord = (input: RecordPullInput) => {
+    last.current = 'record';
+    record.mutate(input, { onSuccess: taken });
+  };
+  const sendAccept = (input: AcceptPullInput) => {
+    last.current = 'accept';
+    accept.mutate(input, {
+      onSuccess: () => {
+        setDecided(input.pullId);
+        taken();
+      },
+    });
+  };
+  const sendAgain = () => {
+    if (last.current === 'record' && record.variables) sendRecord(record.variables);
+    if (last.current === 'accept' && accept.variables) sendAccept(accept.variables);
+  };
+
+  const submit = () => {
+    if (pending || !needs) return;
+    if (unanswered) return sendAgain();
+    const read = readEntry(text, needs);
+    if ('errors' in read) return setErrors(read.errors);
+    setErrors({});
+    const confirmed = doubt !== null;
+    const { value, toolValue } = read.numbers;
+    if (check.offered) sendAccept({ pullId: check.offered.id, toolValue, confirmed });
+    else sendRecord({ checkId: check.id, value, unit, toolValue, confirmed });
+  };
+
+  // What went out unanswered goes out again, under its own id, when the post is heard again.
+  const heard = useRef(connected);
+  useEffect(() => {
+    if (connected && !heard.current && unanswered) sendAgain();
+    heard.current = connected;
+  });
+
+  const fields = error?.problem.fields ?? {};
+  const hasFieldWords = fields.value !== undefined || fields.toolValue !== undefined;
+  return {
+    text,
+    type: (field, typed) => {
+      setText((before) => ({ ...before, [field]: typed }));
+      if (!unanswered) forget();
+    },
+    submit,
+    retype: () => {
+      setText(EMPTY);
+      forget();
+    },
+    errors: { ...fields, ...errors },
+    doubt,
+    pending,
+    unanswered,
+    refusal: error && doubt === null && !unanswered && !hasFieldWords ? error : null,
+  };
+}
