@@ -47,7 +47,7 @@ export async function announcement(where: Where): Promise<string> {
     ...benches.map(({ number, id }) => row(`Bench ${number}`, `${here}/bench/${id}`)),
     row('Desk', `${here}/desk`),
     '',
-    ...Object.values(ACCOUNTS).map(({ login, password }, index) =>
+    ...ACCOUNTS.map(({ login, password }, index) =>
       row(index === 0 ? 'Sign in as' : '', `${login.padEnd(10)}password  ${password}`),
     ),
     '',

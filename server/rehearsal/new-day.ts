@@ -3,7 +3,7 @@ import { serviceDay } from '@/lib/time/service-day';
 import { changeMeet } from '@/server/commands/meet/change';
 import { addProof } from '@/server/commands/proof/add';
 import { testerToday } from '@/server/queries/tester/standing';
-import { meetDetails } from './place';
+import { daysOf } from './place';
 import { settingOf } from './setting';
 import { runner, type Stage } from './stage';
 import { CAST_TESTERS } from './testers';
@@ -17,11 +17,11 @@ export async function openNewDay(stage: Stage): Promise<void> {
   const run = runner(stage, uuidv7);
   const { meet, benches, lead } = await settingOf(stage.db);
   if (serviceDay(now, meet.timeZone, meet.dayStartHour) > meet.endsOn) {
-    const { startsOn, endsOn } = meetDetails(now);
     const { name, place, timeZone, latitudeDeg, heightM, dayStartHour } = meet;
+    const days = daysOf(now, dayStartHour);
     await run(changeMeet, lead, {
       meetId: meet.id,
-      details: { name, place, timeZone, latitudeDeg, heightM, dayStartHour, startsOn, endsOn },
+      details: { name, place, timeZone, latitudeDeg, heightM, dayStartHour, ...days },
     });
   }
   for (const { testerId } of benches) {

@@ -1,10 +1,12 @@
+import type { meets } from '@/db/schema';
 import { slugOf } from '@/lib/desk/slug';
 import { serviceDay } from '@/lib/time/service-day';
+import { DEFAULT_PLAN_SETTINGS } from '@/lib/torque/settings';
+import { MEET_ID, POST_ID } from './ids';
 
 export const POST = { name: 'Hollin Bench', shortName: 'HB' };
 
 const NAME = 'Quillmoor Autumn Meet';
-export const MEET_SLUG = slugOf(NAME);
 const TIME_ZONE = 'Europe/London';
 const MS_A_DAY = 86_400_000;
 
@@ -23,21 +25,25 @@ export function dayStartHour(now: Date): number {
   return hour >= 4 && hour < 9 ? 0 : 4;
 }
 
-/** The meet as it stands on its first form: today and tomorrow. */
-export function meetDetails(now: Date) {
-  const startHour = dayStartHour(now);
+/** The first and last day of a meet that is on now: today and tomorrow. */
+export function daysOf(now: Date, startHour = dayStartHour(now)) {
   return {
-    name: NAME,
-    place: 'Quillmoor paddock',
     startsOn: serviceDay(now, TIME_ZONE, startHour),
     endsOn: serviceDay(new Date(now.getTime() + MS_A_DAY), TIME_ZONE, startHour),
-    timeZone: TIME_ZONE,
   };
 }
 
-/** What the first form of a meet does not ask for. */
-export const siteDetails = (now: Date) => ({
+export const meetRow = (now: Date, createdAt: Date): typeof meets.$inferInsert => ({
+  id: MEET_ID,
+  postId: POST_ID,
+  slug: slugOf(NAME),
+  name: NAME,
+  place: 'Quillmoor paddock',
+  ...daysOf(now),
+  timeZone: TIME_ZONE,
+  dayStartHour: dayStartHour(now),
   latitudeDeg: 54.6,
   heightM: 212,
-  dayStartHour: dayStartHour(now),
+  planSettings: DEFAULT_PLAN_SETTINGS,
+  createdAt,
 });

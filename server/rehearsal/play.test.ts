@@ -8,7 +8,7 @@ import type { Backstage } from './backstage';
 import { MAX_WAITING } from './pace';
 import { backstageOf, step } from './play';
 import { seed } from './seed';
-import { fixedId } from './ids';
+import { fixedId, STAFF_IDS } from './ids';
 
 const OPENED = new Date('2026-10-03T13:20:00Z');
 const SECRET = 'a-secret-of-this-test-that-is-long-enough-0123456789';
@@ -77,8 +77,8 @@ describe('simulated visitors', () => {
 
   it('leave a bench alone once a person has taken it', async () => {
     const [first] = await store.db.select().from(benches).where(eq(benches.number, 1));
-    const taken = { ...scene.stage, actor: scene.setting.owner };
-    await takeBench(taken, fixedId(0x99), { benchId: first!.id });
+    const owner = { kind: 'staff' as const, staffId: STAFF_IDS.owner, sessionVersion: 1 };
+    await takeBench({ ...scene.stage, actor: owner }, fixedId(0x99), { benchId: first!.id });
     const atBench = () => store.db.select().from(tags).where(eq(tags.benchId, first!.id));
     const before = await atBench();
     const signedBefore = await store.db.select().from(records);

@@ -143,14 +143,14 @@ describe('the rehearsal’s story', () => {
 
   it('lets people sign in with the printed passwords, and nobody as the crew', async () => {
     const people = await store.db.select().from(staff);
-    for (const { login, password, role } of Object.values(ACCOUNTS)) {
+    for (const { login, password, role } of ACCOUNTS) {
       const person = people.find((one) => one.login === login)!;
       expect(person.role).toBe(role);
       expect(person.passwordHash).toMatch(/^\$argon2id\$/);
       expect(await verify(person.passwordHash, password)).toBe(true);
     }
-    const member = people.find(({ login }) => login === CREW[0].login)!;
-    for (const { password } of Object.values(ACCOUNTS)) {
+    const member = people.find(({ login }) => login === CREW[0]!.login)!;
+    for (const { password } of ACCOUNTS) {
       expect(await verify(member.passwordHash, password)).toBe(false);
     }
   });
@@ -162,18 +162,7 @@ describe('the rehearsal’s story', () => {
   });
 
   it(
-    'is the same in every rehearsal',
-    async () => {
-      const other = await freshStore();
-      await seedAt(other);
-      expect(await storyOf(other)).toEqual(await storyOf(store));
-      await other.close();
-    },
-    STORY_MS,
-  );
-
-  it(
-    'goes on where it was cut short, without doing anything twice',
+    'goes on where it was cut short, and ends as every other rehearsal does',
     async () => {
       const other = await freshStore();
       let commands = 0;

@@ -1,14 +1,13 @@
-import { asc, eq } from 'drizzle-orm';
-import { commandRuns, ledger, posts } from '@/db/schema';
+import { eq, ne } from 'drizzle-orm';
+import { commandRuns, posts } from '@/db/schema';
 import type { Database } from '@/db/client';
 import { mulberry32 } from '@/lib/signal/random';
 import { openBench } from '@/server/commands/bench/set-state';
 import type { Runtime } from '@/server/runtime';
 import { benchScripts } from './bench-script';
 import { direct, storyClock } from './director';
-import { CURTAIN } from './ids';
+import { CURTAIN, POST_ID } from './ids';
 import { lineScripts } from './line-script';
-import { POST } from './place';
 import { proofScripts } from './proof-script';
 import { setUp } from './set-up';
 import { fixedIds, runner, type Stage } from './stage';
@@ -20,8 +19,7 @@ const STORY_MS = 175 * 60_000;
 
 /** @throws Error when the store holds somebody's own post. */
 export async function refuseOthers(db: Database): Promise<void> {
-  const others = await db.select({ name: posts.name }).from(posts);
-  const other = others.find(({ name }) => name !== POST.name);
+  const [other] = await db.select({ name: posts.name }).from(posts).where(ne(posts.id, POST_ID));
   if (!other) return;
   throw new Error(
     `The configuration cannot be used for a rehearsal: this store belongs to the post ${other.name}. ` +
@@ -31,12 +29,8 @@ export async function refuseOthers(db: Database): Promise<void> {
 
 /** When the story opens: now, unless one that was cut short had begun. */
 async function openingOf(db: Database, now: Date): Promise<Date> {
-  const [first] = await db
-    .select({ at: ledger.at })
-    .from(ledger)
-    .orderBy(asc(ledger.sequence))
-    .limit(1);
-  return first ? new Date(first.at.getTime() + STORY_MS) : now;
+  const [post] = await db.select().from(posts).where(eq(posts.id, POST_ID));
+  return post ? new Date(post.createdAt.getTime() + STORY_MS) : now;
 }
 
 /**

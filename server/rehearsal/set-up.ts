@@ -1,49 +1,40 @@
-import type { Actor } from '@/server/access/actor';
+import { eq } from 'drizzle-orm';
+import { benches, meets, posts, staff } from '@/db/schema';
+import type { Database } from '@/db/client';
 import { setBenchTester } from '@/server/commands/bench/set-tester';
 import { addCertificate } from '@/server/commands/certificate/add';
-import { changeMeet } from '@/server/commands/meet/change';
-import { setUpPost } from '@/server/commands/post/set-up';
-import { addStaff } from '@/server/commands/staff/add';
 import { addTester } from '@/server/commands/tester/add';
-import { ACCOUNTS, CREW, hashFor, unknownPassword, type Account } from './accounts';
-import { meetDetails, POST, siteDetails } from './place';
+import { accountRows } from './accounts';
+import { BENCH_IDS, MEET_ID, POST_ID } from './ids';
+import { meetRow, POST } from './place';
 import { settingOf, type Setting } from './setting';
 import type { Run, Stage } from './stage';
 import { CAST_TESTERS, certificateInput } from './testers';
 
-/** Sets the post up as its owner would: people, meet, benches, testers and their certificates. */
-export async function setUp(stage: Stage, run: Run, opened: Date): Promise<Setting> {
-  const { secret } = stage;
-  const { name, login, password } = ACCOUNTS.owner;
-  const { staffId, meetId } = await run(
-    setUpPost,
-    { kind: 'public' },
-    {
-      post: POST,
-      owner: { name, login, passwordHash: await hashFor(secret, login, password) },
-      meet: { ...meetDetails(opened), benches: CAST_TESTERS.length },
-    },
-  );
-  const owner: Actor = { kind: 'staff', staffId, sessionVersion: 1 };
-  const people: (Account & { password: string })[] = [
-    ACCOUNTS.lead,
-    ACCOUNTS.operator,
-    ...CREW.map((member) => ({ ...member, password: unknownPassword(secret, member.login) })),
-  ];
-  for (const { password: words, ...person } of people) {
-    const passwordHash = await hashFor(secret, person.login, words);
-    await run(addStaff, owner, { ...person, passwordHash });
-  }
-
-  const { lead, benches } = await settingOf(stage.db);
-  await run(changeMeet, lead, {
-    meetId,
-    details: { ...meetDetails(opened), ...siteDetails(opened) },
+/** Post, people, meet and benches: written with fixed ids, which addresses and tests rest on. */
+async function found(db: Database, opened: Date, createdAt: Date): Promise<void> {
+  const [there] = await db.select({ id: posts.id }).from(posts).where(eq(posts.id, POST_ID));
+  if (there) return;
+  // Hashing is slow, so it is done before the transaction.
+  const people = await accountRows(createdAt);
+  await db.transaction(async (tx) => {
+    await tx.insert(posts).values({ id: POST_ID, ...POST, createdAt });
+    await tx.insert(staff).values(people);
+    await tx.insert(meets).values(meetRow(opened, createdAt));
+    await tx
+      .insert(benches)
+      .values(BENCH_IDS.map((id, index) => ({ id, meetId: MEET_ID, number: index + 1 })));
   });
+}
+
+/** Sets the post up, with a tester and its certificate on each bench. */
+export async function setUp(stage: Stage, run: Run, opened: Date): Promise<Setting> {
+  await found(stage.db, opened, stage.clock());
+  const { lead } = await settingOf(stage.db);
   for (const [index, cast] of CAST_TESTERS.entries()) {
     const { testerId } = await run(addTester, lead, cast.tester);
     await run(addCertificate, lead, certificateInput(testerId, cast, opened));
-    await run(setBenchTester, lead, { benchId: benches[index]!.id, testerId });
+    await run(setBenchTester, lead, { benchId: BENCH_IDS[index]!, testerId });
   }
   return settingOf(stage.db);
 }
