@@ -1,4 +1,5 @@
 import { parseArgs } from 'node:util';
+import { measureJs } from './js';
 import { measureCall } from './live-call';
 import { measurePull } from './live-pull';
 import { measureSql } from './sql';
@@ -7,6 +8,7 @@ import { say, type Measurement } from './report';
 const PARTS: Record<string, () => Promise<Measurement[]>> = {
   live: async () => [await measureCall(), await measurePull()],
   sql: async () => [await measureSql()],
+  js: measureJs,
 };
 
 const { values: flags } = parseArgs({ options: { only: { type: 'string' } } });

@@ -1,8 +1,7 @@
 import { callTag } from '@/server/commands/tag/call';
 import { returnToLine } from '@/server/commands/tag/return-to-line';
 import { lineSnapshot } from '@/server/queries/line/snapshot';
-import { ticketOf } from '../support/factories';
-import { fixedId } from '../support/factories';
+import { fixedId, ticketOf } from '../support/factories';
 import { bareServer } from './bare-server';
 import { connectClients } from './clients';
 import { sharedMs } from './clock';
