@@ -37,7 +37,7 @@ const MAX_ROWS = 60;
  */
 const cellsOf = (row: string): string[] =>
   row
-    .split(/[\t;]/.test(row) ? /\s*[\t;]\s*/ : /,\s+|\s+/)
+    .split(/[\t;]/.test(row) ? / *[\t;] */ : /,\s+|\s+/)
     .map((cell) => cell.trim().replace(/,$/, ''))
     .filter((cell, index, all) => cell !== '' || index < all.length - 1);
 
@@ -51,7 +51,9 @@ const COLUMNS = 'direction, torque, error %, expanded uncertainty %, k';
  * or blanks between, point or comma in the numbers. A first row of headings is passed over.
  * `fault` names the row as it is counted on screen, from 1.
  */
-export function parsePoints(text: string): { points: PrintedPoint[] } | { fault: string } {
+export function parsePoints(
+  text: string,
+): { points: PrintedPoint[]; rows: number[] } | { fault: string } {
   const rows = text.split(/\r?\n/).map((row, index) => ({ row: row.trim(), number: index + 1 }));
   const filled = rows.filter(({ row }) => row !== '');
   if (filled[0] && !/\d/.test(filled[0].row)) filled.shift();
@@ -76,10 +78,11 @@ export function parsePoints(text: string): { points: PrintedPoint[] } | { fault:
       number,
     ];
     const bad = cells.slice(1).find((cell) => Number.isNaN(signed(cell)));
+    if (bad === '') return { fault: `Row ${number} has an empty cell.` };
     if (bad !== undefined) return { fault: `Row ${number}: ‘${bad.slice(0, 20)}’ is no number.` };
     points.push({ direction, torque, errorPercent, expandedPercent, k });
   }
-  return { points };
+  return { points, rows: filled.map(({ number }) => number) };
 }
 
 function rowFault(point: PrintedPoint): string | null {
@@ -92,15 +95,21 @@ function rowFault(point: PrintedPoint): string | null {
   return null;
 }
 
-/** What makes no sense about the points of a certificate, naming the row; null when nothing does. */
-export function pointsFault(points: readonly PrintedPoint[]): string | null {
+/**
+ * What makes no sense about the points of a certificate, naming the row; null when nothing does.
+ * `rows` are the rows as they are counted on screen, where they are not simply 1, 2, 3.
+ */
+export function pointsFault(
+  points: readonly PrintedPoint[],
+  rows: readonly number[] = points.map((_, index) => index + 1),
+): string | null {
   const last = new Map<Direction, number>();
   for (const [index, point] of points.entries()) {
     const fault = rowFault(point);
-    if (fault) return `Row ${index + 1}: ${fault}.`;
+    if (fault) return `Row ${rows[index]}: ${fault}.`;
     const before = last.get(point.direction);
     if (before !== undefined && point.torque <= before) {
-      return `Row ${index + 1}: torques rise within a direction, and ${point.torque} comes after ${before}.`;
+      return `Row ${rows[index]}: torques rise within a direction, and ${point.torque} comes after ${before}.`;
     }
     last.set(point.direction, point.torque);
   }
@@ -126,7 +135,7 @@ export function outsideRangeFault(
   const index = points.findIndex(({ torqueNm }) => torqueNm > tester.maxNm * ABOVE_RANGE);
   if (index < 0) return null;
   const shown = (nm: number) => formatTorque(convertTorque(nm, 'N.m', unit), unit);
-  return `Row ${index + 1}: ${shown(points[index]!.torqueNm)} is above the tester’s range, which ends at ${shown(tester.maxNm)}. Is the unit right?`;
+  return `Point ${index + 1}, ${shown(points[index]!.torqueNm)}, is above the tester’s range, which ends at ${shown(tester.maxNm)}. Is the unit right?`;
 }
 
 /** Printed points as they are stored, torque in N·m. */

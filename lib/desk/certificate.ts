@@ -18,8 +18,9 @@ const points = z
     error: 'Give the certificate’s points.',
   })
   .transform((value, context): PrintedPoint[] => {
-    const parsed = typeof value === 'string' ? parsePoints(value) : { points: value };
-    const fault = 'fault' in parsed ? parsed.fault : pointsFault(parsed.points);
+    const parsed =
+      typeof value === 'string' ? parsePoints(value) : { points: value, rows: undefined };
+    const fault = 'fault' in parsed ? parsed.fault : pointsFault(parsed.points, parsed.rows);
     if (fault === null && 'points' in parsed) return parsed.points;
     context.addIssue({ code: 'custom', message: fault ?? 'Give the certificate’s points.' });
     return z.NEVER;

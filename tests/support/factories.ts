@@ -113,6 +113,7 @@ export async function makeMeet(
       ...rest,
     })
     .returning();
+  if (benchCount === 0) return { meet: meet!, benches: [] };
   const rows = await db
     .insert(benches)
     .values(

@@ -13,6 +13,7 @@ interface CertificateCard {
   temperature: string | null;
   points: CertificatePoint[];
   holds: boolean;
+  ended: boolean;
 }
 
 /** Certificates of a tester, the newest first. */
@@ -25,7 +26,9 @@ export function CertificateList({ certificates }: { certificates: CertificateCar
       {certificates.map((certificate) => (
         <li key={certificate.id} className="py-3 first:pt-0">
           <p className="font-semibold">
-            {certificate.number} {certificate.holds && '· holds now'}
+            {certificate.number}
+            {certificate.holds && ' · holds now'}
+            {certificate.ended && ' · out of date'}
           </p>
           <p className="text-fore-quiet">
             {certificate.laboratory}, {certificate.accreditation} · issued {certificate.issued}, due{' '}

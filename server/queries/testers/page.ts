@@ -25,6 +25,8 @@ export interface CertificateView {
   points: CertificatePoint[];
   /** The one that checks rest on today. */
   holds: boolean;
+  /** Its due date has passed. */
+  ended: boolean;
 }
 
 export interface ProofView {
@@ -125,7 +127,8 @@ export async function testerPage(
       traceability: paper.traceability,
       temperature: paper.temperatureC === null ? null : `${formatNumber(paper.temperatureC)} °C`,
       points: paper.points,
-      holds: paper.id === today.certificate?.id,
+      holds: paper.id === today.certificate?.id && paper.dueOn >= dayOf(now),
+      ended: paper.dueOn < dayOf(now),
     })),
     proofs: proofs.slice(0, PROOFS_SHOWN).map(({ proof, by }) => ({
       id: proof.id,
