@@ -1,6 +1,6 @@
 'use client';
 
-import { useActionState } from 'react';
+import { useActionState, useEffect, useRef } from 'react';
 import { Fieldset } from '@/components/ui/fieldset';
 import { Notice } from '@/components/ui/notice';
 import { NumberInput } from '@/components/ui/number-input';
@@ -38,6 +38,11 @@ export function SetUpForm({ today, timeZone, timeZones }: SetUpFormProps) {
     problem: null,
     attempt: 0,
   });
+  const formRef = useRef<HTMLFormElement>(null);
+  useEffect(() => {
+    // The button stands far below the first field that needs another look.
+    if (state.attempt > 0) formRef.current?.querySelector<HTMLElement>('[aria-invalid]')?.focus();
+  }, [state.attempt]);
   const field = (name: SetUpField) => ({
     name,
     defaultValue: state.values[name],
@@ -46,7 +51,13 @@ export function SetUpForm({ today, timeZone, timeZones }: SetUpFormProps) {
 
   return (
     // A new key puts what came back into the fields, which a browser empties after an action.
-    <form key={state.attempt} action={action} className="flex flex-col gap-10" noValidate>
+    <form
+      ref={formRef}
+      key={state.attempt}
+      action={action}
+      className="flex flex-col gap-10"
+      noValidate
+    >
       {state.problem && (
         <Notice kind="problem" title="Nothing was set up yet">
           {state.problem}
@@ -64,7 +75,7 @@ export function SetUpForm({ today, timeZone, timeZones }: SetUpFormProps) {
       </Fieldset>
       <Fieldset legend="The post" heading>
         <TextInput
-          label="Name"
+          label="Name of the post"
           hint="As it stands on records, such as the name of your tent or trailer."
           {...field('post.name')}
         />
@@ -93,7 +104,7 @@ export function SetUpForm({ today, timeZone, timeZones }: SetUpFormProps) {
         />
       </Fieldset>
       <Fieldset legend="The first meet" heading>
-        <TextInput label="Name" {...field('meet.name')} />
+        <TextInput label="Name of the meet" {...field('meet.name')} />
         <TextInput label="Place" {...field('meet.place')} />
         <div className="grid gap-4 sm:grid-cols-2">
           <TextInput label="First day" type="date" {...field('meet.startsOn')} />
