@@ -11,6 +11,10 @@ export const fieldProps = ({ values, errors }: PartProps, field: JoinField) => (
   error: errors[field],
 });
 
+/** Is something wrong in one of these fields? */
+export const hasError = ({ errors }: PartProps, fields: readonly JoinField[]): boolean =>
+  fields.some((field) => errors[field] !== undefined);
+
 /** Is there anything typed or wrong in these fields? Then their fold stands open. */
-export const isTouched = ({ values, errors }: PartProps, fields: readonly JoinField[]): boolean =>
-  fields.some((field) => values[field] !== '' || errors[field] !== undefined);
+export const isTouched = (part: PartProps, fields: readonly JoinField[]): boolean =>
+  hasError(part, fields) || fields.some((field) => part.values[field] !== '');

@@ -1,10 +1,11 @@
+import clsx from 'clsx';
 import { Disclosure } from '@/components/ui/disclosure';
 import { Fieldset } from '@/components/ui/fieldset';
 import { NumberInput } from '@/components/ui/number-input';
 import { RadioCards, type RadioCardOption } from '@/components/ui/radio-cards';
 import { Select, type SelectOption } from '@/components/ui/select';
 import styles from './join.module.css';
-import { fieldProps, type PartProps } from './part';
+import { fieldProps, hasError, type PartProps } from './part';
 
 interface ToolPartProps extends PartProps {
   kinds: { common: RadioCardOption[]; more: RadioCardOption[] };
@@ -14,6 +15,7 @@ interface ToolPartProps extends PartProps {
 /** What kind of tool it is, and from where to where it goes. */
 export function ToolPart({ kinds, units, ...part }: ToolPartProps) {
   const kind = part.values.kind;
+  const isWrong = hasError(part, ['rangeMin', 'rangeMax', 'nominal', 'unit']);
   const isRare = kinds.more.some((option) => option.value === kind);
   return (
     <>
@@ -37,7 +39,13 @@ export function ToolPart({ kinds, units, ...part }: ToolPartProps) {
         </Disclosure>
       </div>
       <Fieldset legend="What does its scale say?">
-        <div className="grid grid-cols-[1fr_1fr_1.25fr] items-start gap-2.5">
+        {/* With something wrong each has a line of its own: words need the room. */}
+        <div
+          className={clsx(
+            'grid items-start gap-2.5',
+            isWrong ? 'grid-cols-1' : 'grid-cols-[1fr_1fr_1.3fr]',
+          )}
+        >
           <NumberInput
             label="From"
             {...fieldProps(part, 'rangeMin')}
@@ -51,11 +59,11 @@ export function ToolPart({ kinds, units, ...part }: ToolPartProps) {
           <NumberInput
             label="Preset value"
             {...fieldProps(part, 'nominal')}
-            fieldClassName={`${styles.whenPreset} col-span-2`}
+            fieldClassName={clsx(styles.whenPreset, !isWrong && 'col-span-2')}
           />
           <Select
             label="Unit"
-            placeholder="Choose"
+            placeholder="Pick"
             options={units}
             required
             {...fieldProps(part, 'unit')}

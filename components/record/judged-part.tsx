@@ -1,12 +1,22 @@
 import { Disclosure } from '@/components/ui/disclosure';
 import { VerdictMark } from '@/components/verdict/verdict-mark';
 import type { RecordedPoint, SignedRecord } from '@/lib/record/record';
+import { statementOf } from '@/lib/torque/statement';
 import { basisWords, limitSourceWords, verdictWords } from '@/lib/torque/words';
 import { Facts } from './facts';
 import { limitsWords } from './meaning';
-import { pointName } from './readings';
+import { divisionOf, pointName } from './readings';
 
 const percent = (value: number): string => `${value.toFixed(2)} %`;
+
+/** The answer without guard band, in the words that a verdict of this plan has. */
+const simpleStatement = (record: SignedRecord): string =>
+  statementOf({
+    plan: record.plan,
+    points: record.evaluation.points.map((point) => ({ ...point, verdict: point.simpleVerdict })),
+    verdict: record.evaluation.simpleVerdict,
+    division: divisionOf(record),
+  });
 
 const guardWords = (guard: number): string =>
   guard === 0
@@ -26,10 +36,15 @@ export function JudgedPart({ record }: { record: SignedRecord }) {
         facts={[
           ['Deviation', basisWords(plan.basis)],
           ['Guard band', guardWords(plan.guard)],
-          ['With the guard band', verdictWords(evaluation.verdict)],
+          ['With the guard band', evaluation.statement],
           [
             'Without guard band',
-            <VerdictMark key="simple" verdict={evaluation.simpleVerdict} size="small" />,
+            <VerdictMark
+              key="simple"
+              verdict={evaluation.simpleVerdict}
+              words={simpleStatement(record)}
+              size="small"
+            />,
           ],
         ]}
       />

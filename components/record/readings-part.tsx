@@ -45,7 +45,7 @@ function PointReadings({ record, point }: { record: SignedRecord; point: Recorde
           <caption className="sr-only">Readings at {name}</caption>
           <thead>
             <tr className="text-fore-quiet text-right align-bottom">
-              <th scope="col" className="w-7 py-1 text-left font-normal">
+              <th scope="col" className="w-5 py-1 text-left font-normal">
                 <span className="sr-only">Number</span>
               </th>
               <th scope="col" className="py-1 font-normal">
@@ -75,7 +75,12 @@ function PointReadings({ record, point }: { record: SignedRecord; point: Recorde
                   {row.deviation !== '' && (
                     <span className="font-reading block">{row.deviation}</span>
                   )}
-                  <span className={clsx('block leading-tight', !row.voided && 'text-fore-quiet')}>
+                  <span
+                    className={clsx(
+                      'block leading-tight',
+                      !row.voided && 'text-fore-quiet whitespace-nowrap',
+                    )}
+                  >
                     {row.words}
                   </span>
                 </td>

@@ -27,7 +27,7 @@ export function RecordHead({ record }: { record: SignedRecord }) {
         <p className="text-xl leading-snug">
           {delivers !== null && (
             <>
-              <strong>{delivers}.</strong>{' '}
+              <strong>{delivers.replace(' ± ', '\u00a0±\u00a0')}.</strong>{' '}
             </>
           )}
           {rest}

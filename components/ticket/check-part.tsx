@@ -10,7 +10,12 @@ export function CheckPart({ check }: { check: RunningCheck }) {
   const newest = readings.map((reading, index) => ({ ...reading, number: index + 1 })).reverse();
   return (
     <section aria-label="Readings" className="mt-5 flex flex-col gap-4">
-      <PullDots taken={progress.done} total={progress.total} noun="pulls" />
+      <div className="flex flex-col gap-1.5">
+        <PullDots taken={progress.done} total={progress.total} noun="pulls" />
+        <p className="text-fore-quiet">
+          {progress.done} of {progress.total} pulls made
+        </p>
+      </div>
       <div className="ground-chalk -mx-3 px-3 py-3">
         <Corridor rows={points} basis={basis} />
       </div>
