@@ -11,8 +11,10 @@ import { sessionOptions, type SessionData } from './session';
 
 /** The cookie session of this request. Only for Next's routes, pages and actions. */
 export async function staffSession() {
+  // Asked first: it tells the build that this page is made for each request.
+  const jar = await cookies();
   const { secret, origin } = getRuntime();
-  return getIronSession<SessionData>(await cookies(), sessionOptions(secret, origin));
+  return getIronSession<SessionData>(jar, sessionOptions(secret, origin));
 }
 
 /** The actor that the cookie speaks for: staff, or the public. Commands check what it may do. */
