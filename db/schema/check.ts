@@ -1,3 +1,4 @@
+import { sql } from 'drizzle-orm';
 import {
   boolean,
   doublePrecision,
@@ -56,6 +57,14 @@ export const checks = pgTable(
     // The running check of a bench: read for every pull.
     index('checks_bench_state').on(table.benchId, table.state),
     index('checks_tag').on(table.tagId),
+    // The running checks of a meet, for every line snapshot: a handful among all that ever were.
+    index('checks_running')
+      .on(table.meetId)
+      .where(sql`${table.state} = 'running'`),
+    // Is a check running with this tester? Asked before it is locked, changed or moved.
+    index('checks_running_tester')
+      .on(table.testerId)
+      .where(sql`${table.state} = 'running'`),
   ],
 );
 

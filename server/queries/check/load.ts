@@ -82,7 +82,11 @@ export async function loadCheckFile(
   const rows = await reader
     .select({ pull: pulls, decision: pullDecisions })
     .from(pulls)
-    .leftJoin(pullDecisions, eq(pullDecisions.pullId, pulls.id))
+    // By the check as well: else the planner may read every decision there is to find these.
+    .leftJoin(
+      pullDecisions,
+      and(eq(pullDecisions.pullId, pulls.id), eq(pullDecisions.checkId, head.check.id)),
+    )
     .where(eq(pulls.checkId, head.check.id))
     .orderBy(asc(pulls.sequence));
   const notes = await reader

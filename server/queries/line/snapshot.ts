@@ -60,7 +60,11 @@ async function runningChecks(reader: Reader, meetId: string): Promise<RunningChe
     .innerJoin(tags, eq(tags.id, checks.tagId))
     .innerJoin(tools, eq(tools.id, tags.toolId))
     .leftJoin(pulls, eq(pulls.checkId, checks.id))
-    .leftJoin(pullDecisions, eq(pullDecisions.pullId, pulls.id))
+    // By the check as well: else the planner may read every decision there is to find these.
+    .leftJoin(
+      pullDecisions,
+      and(eq(pullDecisions.pullId, pulls.id), eq(pullDecisions.checkId, checks.id)),
+    )
     .where(and(eq(checks.meetId, meetId), eq(checks.state, 'running')));
   const heads = new Map(rows.map((row) => [row.check.id, row]));
   return [...heads.values()].map(({ check, tool }) => {

@@ -1,0 +1,2 @@
+CREATE INDEX "checks_running" ON "checks" USING btree ("meet_id") WHERE "checks"."state" = 'running';--> statement-breakpoint
+CREATE INDEX "checks_running_tester" ON "checks" USING btree ("tester_id") WHERE "checks"."state" = 'running';
