@@ -2,6 +2,7 @@ import { PullDots } from '@/components/pull-dots';
 import { Tag } from '@/components/tag/tag';
 import { WarningShape } from '@/components/ui/warning-shape';
 import type { DeskSnapshot } from '@/lib/live/contract';
+import { capital } from './rows';
 
 const STATE_WORDS = { open: 'Open', paused: 'Short break', closed: 'Closed' } as const;
 
@@ -48,7 +49,7 @@ export function BenchCards({ desk }: { desk: DeskSnapshot }) {
               {bench.barred.map((words) => (
                 <p key={words} className="flex gap-2 leading-snug">
                   <WarningShape className="mt-0.5 size-5 shrink-0" />
-                  {words}
+                  {capital(words)}
                 </p>
               ))}
             </div>

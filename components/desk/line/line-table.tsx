@@ -34,6 +34,9 @@ const helper = createColumnHelper<typeof features, LineRow>();
 /** The columns whose text the one search field looks through. */
 const SEARCHED = new Set(['code', 'tool', 'visitor', 'where']);
 
+/** Columns of numbers and times: their heads stand to the right, as they do. */
+const NUMERIC = new Set(['place', 'held', 'joined']);
+
 const columns = helper.columns([
   helper.accessor((row) => row.place ?? undefined, {
     id: 'place',
@@ -105,7 +108,7 @@ export function LineTable({ rows, timeZone, selectedId, onSelect }: LineTablePro
             : `${shown.length} of ${rows.length} tags`}
         </p>
       </div>
-      <DataTable caption="The line">
+      <DataTable caption="Open tags of this meet">
         <thead>
           {table.getHeaderGroups().map((group) => (
             <tr key={group.id}>
@@ -114,6 +117,7 @@ export function LineTable({ rows, timeZone, selectedId, onSelect }: LineTablePro
                 return (
                   <HeadCell
                     key={header.id}
+                    numeric={NUMERIC.has(header.column.id)}
                     aria-sort={
                       sorted === false ? undefined : sorted === 'asc' ? 'ascending' : 'descending'
                     }

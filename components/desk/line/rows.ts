@@ -28,7 +28,8 @@ const GROUPS: TagState[] = [
   'returned',
 ];
 
-const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
+/** The same words with a capital at their head. */
+export const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
 
 function stateOf(tag: DeskTag, isHeld: boolean): string {
   if (tag.state === 'called' && tag.benchNumber !== null)

@@ -37,27 +37,28 @@ export function TagSheet({ row, benches, timeZone, onDone, onClose }: TagSheetPr
     <aside
       aria-labelledby="sheet-heading"
       onKeyDown={(event) => event.key === 'Escape' && onClose()}
-      className="border-line sticky top-4 flex max-h-[calc(100dvh-2rem)] flex-col gap-3 overflow-y-auto rounded-lg border bg-white p-5"
+      className="border-line order-first flex lg:order-none lg:sticky lg:top-4 flex-col gap-3 lg:max-h-[calc(100dvh-2rem)] lg:overflow-y-auto rounded-lg border bg-white p-5"
     >
-      <div className="flex items-start justify-between gap-3">
-        <Tag code={tag.code} />
+      <div className="flex items-start gap-3">
+        <Tag code={tag.code} size="small" />
+        <h2
+          id="sheet-heading"
+          ref={heading}
+          tabIndex={-1}
+          className="font-code mr-auto text-2xl leading-tight font-semibold"
+        >
+          <span className="sr-only">{tag.code}: </span>
+          {row.state}
+          {row.place !== null && `, place ${row.place}`}
+        </h2>
         <button
           type="button"
           onClick={onClose}
-          className="min-h-12 px-2 font-semibold underline underline-offset-4"
+          className="-mt-2 min-h-12 px-2 font-semibold underline underline-offset-4"
         >
           Close
         </button>
       </div>
-      <h2
-        id="sheet-heading"
-        ref={heading}
-        tabIndex={-1}
-        className="font-code text-2xl leading-tight font-semibold"
-      >
-        {tag.code}: {row.state}
-        {row.place !== null && `, place ${row.place}`}
-      </h2>
       <dl className="grid grid-cols-[auto_1fr] gap-x-4 gap-y-1">
         {facts.map(([name, value]) => (
           <div key={name} className="contents">

@@ -24,10 +24,13 @@ export default async function PosterPage({ params }: { params: Promise<{ meet: s
   const join = joinAddress(origin, slug);
   return (
     <>
-      <div className="ground-wall flex flex-wrap items-center gap-4 px-5 py-3 print:hidden">
+      <aside
+        aria-label="Printing"
+        className="ground-wall flex flex-wrap items-center gap-4 px-5 py-3 print:hidden"
+      >
         <p className="mr-auto">One sheet of A4, portrait. Hang it where people walk past.</p>
         <PrintButton />
-      </div>
+      </aside>
       <main className="poster">
         <header>
           <p className="poster-meet">
@@ -53,7 +56,7 @@ export default async function PosterPage({ params }: { params: Promise<{ meet: s
         <footer>
           <p className="font-reading poster-address">{join.text}</p>
           <p className="poster-small">
-            Be on the Wi-Fi of the meet. An as-found check on the day: not a calibration certificate
+            Use the Wi-Fi of the post. An as-found check on the day: not a calibration certificate
             and not a repair. Your tool may be pulled up to its maximum, at your risk; you choose
             when you join.
           </p>
