@@ -1,44 +1,17 @@
 import { eq } from 'drizzle-orm';
 import type { Database } from '@/db/client';
-import {
-  benches,
-  certificates,
-  meets,
-  posts,
-  staff,
-  tags,
-  testerProofs,
-  testers,
-  tools,
-  visitors,
-} from '@/db/schema';
+import { benches, meets, posts, staff, tags, tools, visitors } from '@/db/schema';
 import { tagCode } from '@/lib/line/code';
 import type { Role } from '@/lib/line/states';
 import { DEFAULT_PLAN_SETTINGS } from '@/lib/torque/settings';
-import type { CertificatePoint } from '@/lib/torque/tester';
 import type { Actor } from '@/server/access/actor';
 import { hashToken, linkToken } from '@/server/access/links';
+import { fixedId } from './ids';
 import { TEST_NOW, TEST_SECRET } from './store';
+import { makeCertificate, makeProof, makeTester } from './tester-factories';
 
-/** A fixed id, shaped as a UUIDv7: the same noun and number always give the same one. */
-export function fixedId(noun: keyof typeof NOUNS, number = 1): string {
-  const tail = `${NOUNS[noun]}${String(number).padStart(10, '0')}`;
-  return `01900000-0000-7000-8000-${tail}`;
-}
-const NOUNS = {
-  post: '01',
-  staff: '02',
-  meet: '03',
-  bench: '04',
-  tester: '05',
-  certificate: '06',
-  proof: '07',
-  visitor: '08',
-  tool: '09',
-  tag: '10',
-  /** Ids of command calls. */
-  call: '99',
-};
+export { fixedId } from './ids';
+export { makeCertificate, makeProof, makeTester, TEST_POINTS } from './tester-factories';
 
 /** What the staff of tests sign in with; `TEST_PASSWORD_HASH` is its argon2id hash. */
 export const TEST_PASSWORD = 'quiet-paddock-42';
@@ -126,82 +99,6 @@ export async function makeMeet(
     .returning();
   return { meet: meet!, benches: rows };
 }
-
-/** Both directions of a 10 to 500 N·m tester that reads without error, U 0.3 %, k 2. */
-export const TEST_POINTS: CertificatePoint[] = (['cw', 'ccw'] as const).flatMap((direction) =>
-  [10, 50, 100, 250, 500].map((torqueNm) => ({
-    direction,
-    torqueNm,
-    errorPercent: 0,
-    expandedPercent: 0.3,
-    k: 2,
-  })),
-);
-
-export const makeTester = async (db: Database, values: Insert<typeof testers> = {}) => {
-  const [tester] = await db
-    .insert(testers)
-    .values({
-      id: fixedId('tester'),
-      postId: fixedId('post'),
-      name: 'T-01',
-      maker: 'Harrowgate',
-      model: 'HX 500',
-      serial: 'HX-0001',
-      minNm: 10,
-      maxNm: 500,
-      resolutionNm: 0.1,
-      yearlyDriftPercent: 0.2,
-      temperatureCoefficientPercentPerK: 0.01,
-      connection: { kind: 'keyed' },
-      createdAt,
-      ...values,
-    })
-    .returning();
-  return tester!;
-};
-
-/** Valid at `TEST_NOW` for another nine months, unless other dates are given. */
-export const makeCertificate = async (db: Database, values: Insert<typeof certificates> = {}) => {
-  const [certificate] = await db
-    .insert(certificates)
-    .values({
-      id: fixedId('certificate'),
-      testerId: fixedId('tester'),
-      number: 'C-2026-0117',
-      laboratory: 'Quern Laboratory',
-      accreditation: 'Q-0042',
-      issuedOn: '2026-03-14',
-      dueOn: '2027-03-14',
-      traceability: 'To the SI through the national standard of torque',
-      temperatureC: 20,
-      points: TEST_POINTS,
-      createdAt,
-      ...values,
-    })
-    .returning();
-  return certificate!;
-};
-
-/** Passed with a dead weight at 100 N·m, ninety minutes before `TEST_NOW`. */
-export const makeProof = async (db: Database, values: Insert<typeof testerProofs> = {}) => {
-  const [proof] = await db
-    .insert(testerProofs)
-    .values({
-      id: fixedId('proof'),
-      testerId: fixedId('tester'),
-      method: 'dead-weight',
-      loadNm: 100,
-      readingNm: 100.1,
-      limitPercent: 0.5,
-      result: 'passed',
-      at: new Date(TEST_NOW.getTime() - 90 * 60_000),
-      byStaffId: fixedId('staff', STAFF_NUMBER.lead),
-      ...values,
-    })
-    .returning();
-  return proof!;
-};
 
 /** A waiting click wrench, 60–340 N·m, with its visitor. `number` also gives its code and place. */
 export async function makeTag(
