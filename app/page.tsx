@@ -4,13 +4,14 @@ import { Pegboard } from '@/components/tag/pegboard';
 import { TagPage } from '@/components/tag/tag';
 import { buttonClass } from '@/components/ui/button';
 import { meetsOnNow, type PublicMeet } from '@/server/queries/meet/public';
+import { isSetUp } from '@/server/queries/staff/any';
 import { getRuntime } from '@/server/runtime';
 
 /** The front door: what this is, the meets that are on, and the way in for staff. */
 export default async function FrontDoor() {
   await connection();
   const { store, clock, setupCode } = getRuntime();
-  if (setupCode !== null) redirect('/set-up');
+  if (setupCode !== null && !(await isSetUp(store.db))) redirect('/set-up');
   const meets = await meetsOnNow(store.db, clock());
   return (
     <Pegboard className="flex min-h-dvh flex-col items-center px-4 py-10">

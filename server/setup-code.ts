@@ -1,7 +1,7 @@
 import { randomInt } from 'node:crypto';
 import type { Logger } from 'pino';
 import type { Reader } from '@/db/client';
-import { staff } from '@/db/schema';
+import { isSetUp } from '@/server/queries/staff/any';
 
 // Without letters and digits that are taken for each other.
 const ALPHABET = 'ABCDEFGHJKLMNPRTUVWXY346789';
@@ -11,8 +11,7 @@ const ALPHABET = 'ABCDEFGHJKLMNPRTUVWXY346789';
  * reads the log of the machine may set the post up.
  */
 export async function setupCodeFor(db: Reader, logger: Logger): Promise<string | null> {
-  const [anybody] = await db.select({ id: staff.id }).from(staff).limit(1);
-  if (anybody) return null;
+  if (await isSetUp(db)) return null;
   const letters = Array.from({ length: 8 }, () => ALPHABET.charAt(randomInt(ALPHABET.length))).join(
     '',
   );

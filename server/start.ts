@@ -61,7 +61,7 @@ export async function startServer(env: Env, options: StartOptions): Promise<Runn
     logger,
     hub,
     instruments: bindInstruments({ store, clock, secret, logger, hub }),
-    setupCode: await setupCodeFor(store.db, logger),
+    setupCode: null,
   };
   setRuntime(runtime);
   const sockets = createSocketServer({
@@ -76,6 +76,7 @@ export async function startServer(env: Env, options: StartOptions): Promise<Runn
   hub.attach(sockets.io);
 
   await options.prepare?.(runtime);
+  runtime.setupCode = await setupCodeFor(store.db, logger);
   await runtime.instruments.follow();
   await web.prepare();
   await new Promise<void>((resolve, reject) => {

@@ -1,3 +1,4 @@
+import { isSetUp } from '@/server/queries/staff/any';
 import type { Runtime } from '@/server/runtime';
 import { openNewDay } from './new-day';
 import { refuseOthers, seed as tellStory } from './seed';
@@ -11,11 +12,9 @@ export async function seed(runtime: Runtime): Promise<void> {
   const { store, secret, clock } = runtime;
   await refuseOthers(store.db);
   markAsRehearsal(runtime.env);
-  if (runtime.setupCode !== null) {
+  if (!(await isSetUp(store.db))) {
     console.log('\n  Setting up a made-up meet. This takes some seconds, once.');
   }
   await tellStory(runtime);
   await openNewDay({ db: store.db, secret, clock, publish: () => undefined });
-  // The owner's account is there, so that nobody else may set the post up.
-  runtime.setupCode = null;
 }
