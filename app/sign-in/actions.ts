@@ -4,6 +4,7 @@ import { headers } from 'next/headers';
 import { redirect } from 'next/navigation';
 import { v7 as uuidv7 } from 'uuid';
 import { ownPath } from '@/lib/desk/own-path';
+import { addressOf } from '@/server/access/address';
 import { staffSession } from '@/server/access/current';
 import { homeOf } from '@/server/access/home';
 import { checkPassword } from '@/server/access/sign-in';
@@ -26,7 +27,7 @@ export async function signInAction(_before: SignInState, form: FormData): Promis
   const login = text(form, 'login').slice(0, 100);
   let goOn: string;
   try {
-    const address = (await headers()).get('x-forwarded-for') ?? 'unknown';
+    const address = addressOf(await headers());
     const staffId = await checkPassword(getRuntime().store.db, {
       login,
       password: text(form, 'password'),

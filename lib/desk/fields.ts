@@ -2,12 +2,11 @@ import { z } from 'zod';
 import { parseDecimal } from '@/lib/line/join';
 
 /** A line of text that must be there. `What` begins the sentence: 'The name'. */
-export const line = (what: string, max: number, least = 1) =>
+export const line = (what: string, max: number) =>
   z
     .string({ error: `${what} is missing.` })
     .trim()
     .min(1, `${what} is missing.`)
-    .min(least, `${what} needs at least ${least} characters.`)
     .max(max, `${what} can have at most ${max} characters.`)
     .refine((text) => !/\p{Cc}/u.test(text), `${what} has characters that cannot be printed.`);
 
