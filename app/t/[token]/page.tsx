@@ -14,6 +14,9 @@ interface TicketPageProps {
   params: Promise<{ token: string }>;
 }
 
+// Without a referrer at all a browser keeps the form's origin back too, and the post is refused.
+const FORM_REFERRER = 'same-origin';
+
 /** How often a page without a script asks for news. */
 const RELOAD_SECONDS = 30;
 
@@ -34,7 +37,10 @@ export async function generateMetadata({ params }: TicketPageProps): Promise<Met
   const read = await readTicket((await params).token);
   if (!read) return { title: 'Not found' };
   const { ticket, line } = read;
-  return { title: ticketTitle(ticket, toolsBefore(line.waiting, ticket.code)) };
+  return {
+    title: ticketTitle(ticket, toolsBefore(line.waiting, ticket.code)),
+    referrer: FORM_REFERRER,
+  };
 }
 
 /** A visitor's ticket. The link is the only key to it: an unknown one says nothing. */
