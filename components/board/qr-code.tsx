@@ -23,6 +23,7 @@ export function QrCode({
       role="img"
       aria-label={label}
       viewBox={`${-quiet} ${-quiet} ${side} ${side}`}
+      preserveAspectRatio="xMinYMin meet"
       shapeRendering="crispEdges"
       className={className}
     >

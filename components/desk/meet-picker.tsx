@@ -10,7 +10,16 @@ interface MeetPickerProps {
 /** Chooses the meet that a page of the desk is about: a plain form, so that it works at once. */
 export function MeetPicker({ path, meets, chosen }: MeetPickerProps) {
   const [only] = meets;
-  if (meets.length === 1 && only) return <Link href={`/desk/line/${only.slug}`}>{only.name}</Link>;
+  if (meets.length === 1 && only) {
+    return (
+      <Link
+        href={`/desk/line/${only.slug}`}
+        className="inline-flex min-h-12 items-center underline underline-offset-4"
+      >
+        {only.name}
+      </Link>
+    );
+  }
   return (
     <form action={path} className="flex items-center gap-2.5">
       <label htmlFor="meet" className="font-semibold">
