@@ -1,6 +1,7 @@
-import { mkdirSync } from 'node:fs';
 import path from 'node:path';
 import type { PgDatabase, PgQueryResultHKT } from 'drizzle-orm/pg-core';
+import { createLogSync, syncFolder } from './durable';
+import { makeFolder } from './folder';
 import * as schema from './schema';
 
 export type Database = PgDatabase<PgQueryResultHKT, typeof schema>;
@@ -11,6 +12,8 @@ export type Reader = Database | Transaction;
 export interface Store {
   db: Database;
   kind: 'pglite' | 'postgres';
+  /** Resolves once everything committed so far would outlast a power cut. */
+  flush(): Promise<void>;
   close(): Promise<void>;
 }
 
@@ -19,6 +22,9 @@ export type StoreOptions =
   | { kind: 'memory' }
   | { kind: 'dump'; dump: Blob }
   | { kind: 'postgres'; url: string };
+
+/** A server writes its log before it answers; what is in memory outlasts nothing. */
+const NO_FLUSH = async (): Promise<void> => undefined;
 
 const MIGRATIONS = path.join(import.meta.dirname, 'migrations');
 
@@ -36,7 +42,7 @@ async function openPostgres(url: string): Promise<Store> {
   const pool = new pg.Pool({ connectionString: url, max: 10 });
   const db = drizzle({ client: pool, schema });
   await migrate(db, { migrationsFolder: MIGRATIONS });
-  return { db, kind: 'postgres', close: () => pool.end() };
+  return { db, kind: 'postgres', flush: NO_FLUSH, close: () => pool.end() };
 }
 
 async function openPglite(options: Exclude<StoreOptions, { kind: 'postgres' }>): Promise<Store> {
@@ -45,12 +51,25 @@ async function openPglite(options: Exclude<StoreOptions, { kind: 'postgres' }>):
     import('drizzle-orm/pglite'),
     import('drizzle-orm/pglite/migrator'),
   ]);
-  if (options.kind === 'folder') mkdirSync(options.dataDir, { recursive: true });
+  if (options.kind === 'folder') makeFolder(options.dataDir);
   const client =
     options.kind === 'folder'
       ? await PGlite.create(options.dataDir)
       : await PGlite.create(options.kind === 'dump' ? { loadDataDir: options.dump } : {});
   const db = drizzle({ client, schema });
   if (options.kind !== 'dump') await migrate(db, { migrationsFolder: MIGRATIONS });
-  return { db, kind: 'pglite', close: () => client.close() };
+  if (options.kind !== 'folder') {
+    return { db, kind: 'pglite', flush: NO_FLUSH, close: () => client.close() };
+  }
+  const { dataDir } = options;
+  await syncFolder(dataDir);
+  return {
+    db,
+    kind: 'pglite',
+    flush: createLogSync(dataDir).flush,
+    async close() {
+      await client.close();
+      await syncFolder(dataDir);
+    },
+  };
 }

@@ -1,8 +1,9 @@
 import { createHash } from 'node:crypto';
-import { mkdirSync, realpathSync, unlinkSync } from 'node:fs';
+import { realpathSync, unlinkSync } from 'node:fs';
 import net from 'node:net';
 import os from 'node:os';
 import path from 'node:path';
+import { makeFolder } from './folder';
 
 export interface LockHolder {
   pid: number;
@@ -69,7 +70,7 @@ export async function lockDataFolder(
   dataDir: string,
   now: Date,
 ): Promise<{ release(): Promise<void> }> {
-  mkdirSync(dataDir, { recursive: true });
+  makeFolder(dataDir);
   const folder = realpathSync(dataDir);
   const at = address(folder);
   const holder: LockHolder = { pid: process.pid, since: now.toISOString() };

@@ -8,9 +8,16 @@ const blankless = (env: NodeJS.ProcessEnv) =>
     Object.entries(env).filter(([, value]) => value !== undefined && value.trim() !== ''),
   );
 
+const PORT_WORDS = 'a port is a whole number from 0 to 65535';
+
 const schema = z.object({
   NODE_ENV: z.enum(['development', 'production', 'test']).default('production'),
-  PORT: z.coerce.number().int().min(0).max(65535).default(3000),
+  PORT: z.coerce
+    .number(PORT_WORDS)
+    .int(PORT_WORDS)
+    .min(0, PORT_WORDS)
+    .max(65535, PORT_WORDS)
+    .default(3000),
   HOST: z.string().default('0.0.0.0'),
   PULLPOST_ORIGIN: z.url().optional(),
   PULLPOST_DATA: z.string().default('.data/post'),
@@ -38,8 +45,8 @@ export interface Env {
 export function readEnv(source: NodeJS.ProcessEnv = process.env): Env {
   const parsed = schema.safeParse(blankless(source));
   if (!parsed.success) {
-    const lines = parsed.error.issues.map((issue) => `  ${issue.path.join('.')}: ${issue.message}`);
-    throw new Error(`The configuration cannot be used:\n${lines.join('\n')}`);
+    const faults = parsed.error.issues.map((issue) => `${issue.path.join('.')}: ${issue.message}`);
+    throw new Error(`The configuration cannot be used: ${faults.join('; ')}.`);
   }
   const env = parsed.data;
   return {

@@ -1,5 +1,5 @@
 import { parseArgs } from 'node:util';
-import { DataFolderLockedError } from '@/db/lock';
+import { startWords } from './start-words';
 
 const { values: flags } = parseArgs({
   options: {
@@ -9,19 +9,6 @@ const { values: flags } = parseArgs({
     visitors: { type: 'boolean', default: false },
   },
 });
-
-/** Errors at start that a person can act on; anything else keeps its stack. */
-function wordsFor(error: unknown, dataDir: string): string | null {
-  if (error instanceof DataFolderLockedError) return error.message;
-  const { code, message } = error as NodeJS.ErrnoException;
-  if (code === 'EACCES' || code === 'EROFS' || code === 'EPERM') {
-    return `The data folder ${dataDir} cannot be written (${code}). Make it writable for this user, or set PULLPOST_DATA.`;
-  }
-  if (code === 'EADDRINUSE')
-    return `The port is in use by another program (${message}). Set PORT to a free one.`;
-  if (code === 'ENOSPC') return `The disk of the data folder ${dataDir} is full.`;
-  return error instanceof Error && error.message.startsWith('The configuration') ? message : null;
-}
 
 async function main(): Promise<void> {
   // Read before Next is loaded: it decides by NODE_ENV what it is.
@@ -35,10 +22,10 @@ async function main(): Promise<void> {
     process.env.LOG_LEVEL ||= 'warn';
   }
   const { readEnv } = await import('./env');
-  let dataDir = process.env.PULLPOST_DATA ?? '.data/post';
+  let where = { dataDir: '', host: '', port: 0, hasDatabaseUrl: false };
   try {
     const env = readEnv();
-    dataDir = env.dataDir;
+    where = { ...env, hasDatabaseUrl: env.databaseUrl !== null };
     const { startServer } = await import('./start');
     const rehearsal = flags.rehearsal ? await import('./rehearsal') : null;
     if (flags.fresh) await rehearsal?.startOver(env);
@@ -53,7 +40,7 @@ async function main(): Promise<void> {
     process.once('SIGINT', stop);
     process.once('SIGTERM', stop);
   } catch (error) {
-    const words = wordsFor(error, dataDir);
+    const words = startWords(error, where);
     console.error(words ? `\n${words}\n` : error);
     process.exit(1);
   }

@@ -45,6 +45,7 @@ export function commandContext(actor: Actor, runtime: Runtime = getRuntime()): C
     actor,
     clock: runtime.clock,
     secret: runtime.secret,
+    flush: runtime.store.flush,
     publish: (events, revision) => runtime.hub.publish(events, revision),
   };
 }

@@ -1,6 +1,7 @@
 import { randomBytes } from 'node:crypto';
-import { mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
+import { makeFolder } from '@/db/folder';
 
 /**
  * The post's secret: links and sessions rest on it. Kept in a file beside the database, so that a
@@ -14,7 +15,7 @@ export function readSecret(dataDir: string, given: string | null): string {
   } catch (error) {
     if ((error as NodeJS.ErrnoException).code !== 'ENOENT') throw error;
   }
-  mkdirSync(dataDir, { recursive: true });
+  makeFolder(dataDir);
   const secret = randomBytes(48).toString('base64url');
   writeFileSync(file, `${secret}\n`, { mode: 0o600 });
   return secret;

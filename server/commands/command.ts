@@ -16,6 +16,8 @@ export interface CommandContext {
   actor: Actor;
   clock: () => Date;
   secret: string;
+  /** Waits until what was committed would outlast a power cut; without it, nothing is waited for. */
+  flush?: () => Promise<void>;
   /** Called once, after the commit. `revision` only grows. */
   publish: (events: LiveEvent[], revision: number) => void;
 }
@@ -79,8 +81,8 @@ const codeOf = (error: unknown): unknown =>
 
 /**
  * The one shape of a write: authorise → parse → one transaction (load or refuse, decide in lib,
- * write, ledger entry) → publish. A repeat with the same (actor, command, id) and input gets the
- * stored result; with another input it is refused.
+ * write, ledger entry) → on the disk → publish. A repeat with the same (actor, command, id) and
+ * input gets the stored result; with another input it is refused.
  */
 export function defineCommand<Schema extends z.ZodType, Result>(
   spec: CommandSpec<Schema, Result>,
@@ -157,6 +159,8 @@ export function defineCommand<Schema extends z.ZodType, Result>(
       revision = entry!.sequence;
       return outcome.result;
     });
+    // A repeat waits too: the first run may have been cut off between its commit and the disk.
+    await ctx.flush?.();
     if (events.length > 0) ctx.publish(events, revision);
     return result;
   }

@@ -72,6 +72,7 @@ export function bindInstruments({
       actor: { kind: 'tester' as const, testerId },
       clock,
       secret,
+      flush: store.flush,
       publish: hub.publish,
     };
     try {
