@@ -54,20 +54,27 @@ export function daysFault({ startsOn, endsOn }: Days): string | null {
   return days > MAX_DAYS ? `A meet has at most ${MAX_DAYS} days. Is the year right?` : null;
 }
 
-const daysInOrder = (days: Days, context: z.core.$RefinementCtx<Days>) => {
-  const fault = daysFault(days);
-  if (fault) context.addIssue({ code: 'custom', path: ['endsOn'], message: fault });
+const daysSchema = z.object({ startsOn: fields.startsOn, endsOn: fields.endsOn });
+
+/** Said together with what is wrong elsewhere, as soon as both days are dates. */
+const daysInOrder = {
+  path: ['endsOn'],
+  error: ({ input }: { input?: unknown }) => daysFault(input as Days) ?? undefined,
+  when: ({ value }: { value: unknown }) => daysSchema.safeParse(value).success,
 };
+const inOrder = (days: Days): boolean => daysFault(days) === null;
 
 /** The first meet, as the set-up asks for it. */
-export const firstMeetSchema = z.object({ ...fields, benches }).superRefine(daysInOrder);
+export const firstMeetSchema = z.object({ ...fields, benches }).refine(inOrder, daysInOrder);
 
 export const newMeetSchema = z
   .object({ ...fields, ...siteFields, benches })
-  .superRefine(daysInOrder);
+  .refine(inOrder, daysInOrder);
 
 /** All that the form of a meet changes at once. */
-export const meetDetailsSchema = z.object({ ...fields, ...siteFields }).superRefine(daysInOrder);
+export const meetDetailsSchema = z
+  .object({ ...fields, ...siteFields })
+  .refine(inOrder, daysInOrder);
 
 /** A change of a meet: its details, or whether visitors may join, or both. */
 export const changeMeetSchema = z.object({

@@ -56,7 +56,9 @@ export function SortedTable<Item extends RowData>({
                       </span>
                     </button>
                   ) : (
-                    <table.FlexRender header={header} />
+                    <span className="flex min-h-10 items-center">
+                      <table.FlexRender header={header} />
+                    </span>
                   )}
                 </HeadCell>
               );

@@ -44,9 +44,8 @@ export function TesterFacts({ tester }: { tester: TesterFactsView }) {
       </Fact>
       <Fact name="Connection">
         {connectionWords(tester.connection)}{' '}
-        {tester.status
-          ? tester.status.words
-          : tester.connection.kind !== 'keyed' && 'It is opened when the tester stands on a bench.'}
+        {tester.connection.kind !== 'keyed' &&
+          (tester.status?.words ?? 'It is opened when the tester stands on a bench.')}
       </Fact>
     </dl>
   );

@@ -79,6 +79,7 @@ describe('post.set-up', async () => {
     expect(refusal).toMatchObject({ code: 'invalid' });
     expect(Object.keys((refusal as { extra: { fields: object } }).extra.fields).sort()).toEqual([
       'meet.benches',
+      'meet.endsOn',
       'meet.timeZone',
       'owner.login',
       'owner.name',
