@@ -1,10 +1,12 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
 import { AddBench } from '@/components/desk/admin/add-bench';
 import { AdminPage } from '@/components/desk/admin/admin-page';
 import { BenchCard } from '@/components/desk/admin/bench-card';
 import { MeetPicker } from '@/components/desk/meet-picker';
 import { ButtonLink } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty-state';
+import { Notice } from '@/components/ui/notice';
 import { MAX_BENCHES } from '@/lib/desk/meet';
 import { benchList, testerChoices } from '@/server/queries/benches/list';
 import { getRuntime } from '@/server/runtime';
@@ -40,6 +42,14 @@ export default async function BenchesPage({ searchParams }: PageInput) {
       lead={`${meet.name}, ${meet.days}. A tester feeds one bench only.`}
       aside={<MeetPicker path="/desk/benches" meets={meets} chosen={meet.slug} />}
     >
+      {testers.length === 0 && (
+        <Notice title="No tester yet">
+          <Link href="/desk/testers/new" className="underline underline-offset-4">
+            Enter a tester
+          </Link>
+          , then choose it here.
+        </Notice>
+      )}
       <div className="grid gap-6 lg:grid-cols-2">
         {benches.map((bench) => (
           // A tester that was changed elsewhere is chosen anew.
