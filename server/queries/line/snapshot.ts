@@ -54,21 +54,26 @@ interface RunningCheck {
 
 /** How far each running check of the meet is. */
 async function runningChecks(reader: Reader, meetId: string): Promise<RunningCheck[]> {
-  const rows = await reader
-    .select({ check: checks, tool: tools, pull: pulls, decision: pullDecisions })
+  const running = await reader
+    .select({ check: checks, tool: tools })
     .from(checks)
     .innerJoin(tags, eq(tags.id, checks.tagId))
     .innerJoin(tools, eq(tools.id, tags.toolId))
-    .leftJoin(pulls, eq(pulls.checkId, checks.id))
-    // By the check as well: else the planner may read every decision there is to find these.
+    .where(and(eq(checks.meetId, meetId), eq(checks.state, 'running')));
+  if (running.length === 0) return [];
+  const ids = running.map(({ check }) => check.id);
+  // Pulls and decisions are named by their checks, each for itself: in one join with the checks the
+  // planner, which knows no counts in PGlite, reads every pull there is.
+  const rows = await reader
+    .select({ pull: pulls, decision: pullDecisions })
+    .from(pulls)
     .leftJoin(
       pullDecisions,
-      and(eq(pullDecisions.pullId, pulls.id), eq(pullDecisions.checkId, checks.id)),
+      and(eq(pullDecisions.pullId, pulls.id), inArray(pullDecisions.checkId, ids)),
     )
-    .where(and(eq(checks.meetId, meetId), eq(checks.state, 'running')));
-  const heads = new Map(rows.map((row) => [row.check.id, row]));
-  return [...heads.values()].map(({ check, tool }) => {
-    const files = gatherPulls(rows.filter((row) => row.check.id === check.id));
+    .where(inArray(pulls.checkId, ids));
+  return running.map(({ check, tool }) => {
+    const files = gatherPulls(rows.filter(({ pull }) => pull.checkId === check.id));
     const { progress, nextStepIndex } = progressOf({
       plan: check.plan,
       tool,

@@ -148,7 +148,8 @@ export function fillStatements(facts: FillFacts): FillStatement[] {
       text: `insert into ledger (at, actor, command, meet_id, subject_id, detail)
         select $3::timestamptz - (${LEDGER_ENTRIES} - e) * interval '189 seconds', 'staff:' || $5::text,
           (array['tag.join', 'tag.call', 'check.start', 'pull.record', 'check.sign-off'])[1 + e % 5],
-          pg_temp.fill_meet((e::bigint * $2::int / ${LEDGER_ENTRIES + 1})::int + 1, $2, $4),
+          case when e % 50 > 0
+            then pg_temp.fill_meet((e::bigint * $2::int / ${LEDGER_ENTRIES + 1})::int + 1, $2, $4) end,
           pg_temp.fill_id(16, (e::bigint * $1::int / ${LEDGER_ENTRIES + 1})::int + 1),
           jsonb_build_object('code', 'A' || lpad((e % 99 + 1)::text, 2, '0'), 'state', 'waiting',
             'place', 'visitor', 'bench', 1)

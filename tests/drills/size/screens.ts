@@ -10,11 +10,13 @@ import { benchList, testerChoices } from '@/server/queries/benches/list';
 import { boardView } from '@/server/queries/board/view';
 import { checkSnapshot } from '@/server/queries/check/snapshot';
 import { deskSnapshot } from '@/server/queries/desk/snapshot';
+import { ledgerPage } from '@/server/queries/ledger/page';
 import { lineSnapshot } from '@/server/queries/line/snapshot';
 import { meetBySlug, meetsOnNow } from '@/server/queries/meet/public';
 import { meetList } from '@/server/queries/meets/list';
 import { meetDetails } from '@/server/queries/meets/details';
 import { recordOfToken } from '@/server/queries/record/by-token';
+import { recordsOfMeet } from '@/server/queries/records/list';
 import { isSetUp } from '@/server/queries/staff/any';
 import { staffList, staffMember } from '@/server/queries/staff/list';
 import { testerList } from '@/server/queries/testers/list';
@@ -66,6 +68,12 @@ export function screens(facts: ScreenFacts): Screen[] {
     ['desk room', () => deskSnapshot(reader, meet.id, now)],
     ['desk: meets', () => meetList(reader, now)],
     ['desk: a meet', () => meetDetails(reader, meet.id)],
+    ['desk: records', () => recordsOfMeet(reader, secret, meet.id)],
+    ['desk: records, last page', () => recordsOfMeet(reader, secret, meet.id, 1000)],
+    ['desk: ledger', () => ledgerPage(reader, { meetId: meet.id })],
+    ['desk: ledger, far back', () => ledgerPage(reader, { meetId: meet.id, before: 499_000 })],
+    ['desk: ledger of a tag', () => ledgerPage(reader, { meetId: meet.id, tagCode: 'C10' })],
+    ['desk: ledger of no meet', () => ledgerPage(reader, { meetId: null })],
     ['desk: benches', () => benchList(reader, meet.id, now)],
     ['desk: testers for a bench', () => testerChoices(reader)],
     ['desk: testers', () => testerList(reader, now)],
