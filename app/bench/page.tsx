@@ -3,6 +3,7 @@ import Link from 'next/link';
 import { redirect } from 'next/navigation';
 import { EmptyState } from '@/components/ui/empty-state';
 import { TopBar } from '@/components/ui/top-bar';
+import { SignOut } from './_components/sign-out';
 import { currentStaff } from '@/server/access/current';
 import { benchChoices, type BenchChoice } from '@/server/queries/bench/list';
 import { getRuntime } from '@/server/runtime';
@@ -38,6 +39,7 @@ export default async function BenchesPage() {
     <>
       <TopBar title="Benches" isHeading>
         <span>{person.name}</span>
+        <SignOut />
       </TopBar>
       <main className="mx-auto flex max-w-4xl flex-col gap-8 p-6">
         {meets.length === 0 && (

@@ -25,11 +25,11 @@ export function BenchFrame({ actions, children, className }: BenchFrameProps) {
 /** Left the one thing to do, right what belongs to it. */
 export function TwoColumns({ left, right }: { left: ReactNode; right: ReactNode }) {
   return (
-    <div className="lg:grid lg:h-full lg:grid-cols-[26.5rem_minmax(0,1fr)]">
-      <div className="border-line flex min-h-0 flex-col gap-4 overflow-y-auto p-6 lg:border-r">
+    <div className="lg:grid lg:h-full lg:min-h-0 lg:flex-1 lg:grid-cols-[26.5rem_minmax(0,1fr)]">
+      <div className="border-line flex min-h-0 flex-col gap-3.5 overflow-y-auto px-6 py-4 lg:border-r">
         {left}
       </div>
-      <div className="flex min-h-0 flex-col gap-4 overflow-y-auto p-6">{right}</div>
+      <div className="flex min-h-0 flex-col gap-4 overflow-y-auto px-6 py-4">{right}</div>
     </div>
   );
 }

@@ -72,7 +72,7 @@ export function CalledPhase({ tag }: { tag: TagView & { calledAt: string } }) {
             wide
             pending={pending}
             onClick={here.run}
-            className="font-code min-h-24 text-4xl"
+            className="font-code min-h-24 text-4xl!"
           >
             Tool is here
           </Button>

@@ -56,11 +56,13 @@ export function FreePhase() {
       ];
 
   return (
-    <BenchFrame actions={actions}>
+    <BenchFrame actions={actions} className="flex flex-col">
+      <div className="px-6 pt-4 empty:hidden">
+        <BarredNotice />
+      </div>
       <TwoColumns
         left={
           <>
-            <BarredNotice />
             {first ? (
               <>
                 <ToolLine tag={first} />
@@ -69,7 +71,7 @@ export function FreePhase() {
                   wide
                   pending={call.isPending}
                   onClick={callNext}
-                  className="font-code min-h-28 text-5xl"
+                  className="font-code min-h-28 text-5xl!"
                 >
                   {takeWords(first)}
                 </Button>

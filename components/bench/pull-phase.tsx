@@ -10,8 +10,8 @@ import { ProblemNotice } from './problem-notice';
 import { CheckPanels, type CheckPanel } from './pull/check-panels';
 import { CorridorSide } from './pull/corridor-side';
 import { entryNeeds } from './pull/entry';
+import { entryMessage } from './pull/entry-message';
 import { Instruction } from './pull/instruction';
-import { LastReading } from './pull/last-reading';
 import { OfferedValue } from './pull/offered-value';
 import { pullActions } from './pull/pull-actions';
 import { ReadingEntry } from './pull/reading-entry';
@@ -38,6 +38,16 @@ export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
   const focusField = () => field.current?.focus();
   const entry = useEntry({ check, needs, unit, connected, onTaken: focusField });
   const step = check.offeredStep ?? check.step;
+
+  const message =
+    entryMessage(entry) ??
+    (check.offered ? (
+      <OfferedValue check={check} pull={check.offered} />
+    ) : check.paused ? (
+      <Notice kind="problem" title="Paused">
+        Nothing is taken until the check goes on.
+      </Notice>
+    ) : undefined);
 
   const close = () => {
     setPanel(null);
@@ -66,14 +76,8 @@ export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
       <TwoColumns
         left={
           <>
-            <ToolLine tag={tag} />
-            {step && <Instruction check={check} step={step} />}
-            {check.offered && <OfferedValue check={check} pull={check.offered} />}
-            {check.paused && (
-              <Notice kind="problem" title="Paused">
-                Nothing is taken until the check goes on.
-              </Notice>
-            )}
+            <ToolLine tag={tag} size="middle" />
+            {step && <Instruction step={step}>{message}</Instruction>}
             {listens && (
               <WaitingForTester
                 simulated={tester?.kind === 'simulated'}
@@ -92,7 +96,6 @@ export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
               />
             )}
             <ProblemNotice errors={[pause.error, simulate.error]} />
-            <LastReading check={check} />
           </>
         }
         right={

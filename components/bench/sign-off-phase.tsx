@@ -43,15 +43,17 @@ export function SignOffPhase({ check, tag }: { check: CheckView; tag: TagView })
         left={
           <>
             <ToolLine tag={tag} />
-            <div aria-live="polite">
-              <VerdictHeading verdict={check.verdict} words={check.statement} level={2} />
+            <div className="flex min-h-0 flex-1 flex-col gap-3 overflow-y-auto">
+              <div aria-live="polite">
+                <VerdictHeading verdict={check.verdict} words={check.statement} level={2} />
+              </div>
+              <p className="text-fore-quiet">{check.planName}</p>
+              {check.stoppedEarly && <p className="text-lg font-bold">Stopped early.</p>}
+              <Words title="Missing" lines={check.missing} />
+              <Words title="Not followed" lines={check.notFollowed} />
+              <Words title="Notes" lines={check.notes.map(({ text }) => text)} />
             </div>
-            <p className="text-fore-quiet">{check.planName}</p>
-            {check.stoppedEarly && <p className="text-lg font-bold">Stopped early.</p>}
-            <Words title="Missing" lines={check.missing} />
-            <Words title="Not followed" lines={check.notFollowed} />
-            <Words title="Notes" lines={check.notes.map(({ text }) => text)} />
-            <div className="mt-auto flex flex-col gap-3">
+            <div className="flex flex-col gap-2">
               <ProblemNotice errors={[signOff.error]} />
               <Button
                 size="big"

@@ -9,17 +9,18 @@ const placeWords = (tag: TagView): string | null =>
 
 interface ToolLineProps {
   tag: TagView;
-  size?: 'card' | 'small';
+  size?: 'card' | 'middle' | 'small';
   /** Stands in a list: the same tag may be elsewhere on the screen, and that one moves. */
   still?: boolean;
 }
 
 /** Tag and tool side by side, as everywhere on the bench. */
 export function ToolLine({ tag, size = 'card', still = false }: ToolLineProps) {
+  const look = size === 'middle' ? ({ size: 'card', capHeight: '1.7rem' } as const) : { size };
   const last = [tag.visitorName, placeWords(tag)].filter((words) => words !== null).join(' · ');
   return (
     <div className="flex items-center gap-4">
-      {still ? <Tag code={tag.code} size={size} /> : <MovingTag tag={tag} size={size} />}
+      {still ? <Tag code={tag.code} {...look} /> : <MovingTag tag={tag} {...look} />}
       <div className="min-w-0 leading-snug">
         <p className="font-bold">{tag.tool}</p>
         <p className="text-fore-quiet">{tag.plate}</p>

@@ -2,6 +2,7 @@ import type { Metadata } from 'next';
 import { notFound, redirect } from 'next/navigation';
 import { z } from 'zod';
 import { BenchScreen } from '@/components/bench/bench-screen';
+import { SignOut } from '@/app/bench/_components/sign-out';
 import { currentStaff } from '@/server/access/current';
 import { benchSnapshot } from '@/server/queries/bench/snapshot';
 import { checkSnapshot } from '@/server/queries/check/snapshot';
@@ -25,7 +26,7 @@ export default async function BenchPage({ params }: { params: Promise<{ bench: s
       bench={bench}
       check={check}
       me={{ id: person.id, name: person.name, role: person.role }}
-      signOut={null}
+      signOut={<SignOut />}
     />
   );
 }

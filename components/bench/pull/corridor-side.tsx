@@ -2,6 +2,7 @@
 
 import type { CheckView, PullView, StepView } from '@/lib/live/contract';
 import { Corridor } from '../../corridor/corridor';
+import { LastReading } from './last-reading';
 import { PullStrip } from './pull-strip';
 
 interface CorridorSideProps {
@@ -11,20 +12,26 @@ interface CorridorSideProps {
 }
 
 /** More rows than this are drawn small, so that the corridor needs no scrolling. */
-const ROOMY_ROWS = 4;
+const ROOMY_ROWS = 3;
 
-/** The corridor filling up, and the pulls of the point in hand. */
+/** The last reading, the corridor filling up, and the pulls of the point in hand. */
 export function CorridorSide({ check, step, onChoose }: CorridorSideProps) {
+  const isRoomy = check.points.length <= ROOMY_ROWS;
   return (
     <>
-      <p className="text-fore-quiet flex flex-wrap justify-between gap-x-4">
-        <span>{check.planName}</span>
-        <span>{check.progressWords}</span>
-      </p>
+      <div className="flex min-h-16 items-start justify-between gap-6">
+        <LastReading check={check} />
+        <p className="text-fore-quiet text-right leading-snug">
+          {check.progressWords}
+          <br />
+          {check.planName}
+        </p>
+      </div>
       <Corridor
         rows={check.points}
         basis={check.basis}
-        size={check.points.length > ROOMY_ROWS ? 'compact' : 'roomy'}
+        size={isRoomy ? 'roomy' : 'compact'}
+        className={isRoomy ? '' : '[&_.corridor]:[--row:3.1rem]'}
       />
       {step && <PullStrip check={check} step={step} onChoose={onChoose} />}
     </>

@@ -1,15 +1,13 @@
 'use client';
 
+import clsx from 'clsx';
 import { useEffect, useRef, type FormEvent, type KeyboardEvent, type RefObject } from 'react';
 import type { CheckView } from '@/lib/live/contract';
-import { TORQUE_UNITS, unitText, type TorqueUnit } from '@/lib/torque/units';
+import type { TorqueUnit } from '@/lib/torque/units';
 import { Button } from '../../ui/button';
-import { controlClass } from '../../ui/field';
-import { Kbd } from '../../ui/kbd';
-import { Notice } from '../../ui/notice';
 import { NumberInput } from '../../ui/number-input';
-import { ProblemNotice } from '../problem-notice';
 import type { EntryNeeds } from './entry';
+import { BIG_NUMBER, TESTER_VALUE, TesterValue } from './tester-value';
 import type { Entry } from './use-entry';
 
 interface ReadingEntryProps {
@@ -47,89 +45,64 @@ export function ReadingEntry(props: ReadingEntryProps) {
     event.preventDefault();
     entry.submit();
   };
+  const words =
+    entry.doubt !== null
+      ? 'Take it all the same'
+      : entry.unanswered
+        ? 'Send again'
+        : BUTTON_WORDS[needs.verb];
+  const fields = Number(needs.value) + Number(needs.toolValue);
   return (
-    <form onSubmit={submit} onKeyDown={onceOnly} className="flex flex-col gap-3" noValidate>
+    <form
+      onSubmit={submit}
+      onKeyDown={onceOnly}
+      noValidate
+      className={clsx(
+        'grid items-end gap-3',
+        fields === 1 && entry.doubt === null ? 'grid-cols-[minmax(0,1fr)_auto]' : 'grid-cols-2',
+      )}
+    >
       {needs.toolValue && (
         <NumberInput
-          ref={field}
           data-number
-          size="big"
-          label="Tool’s display"
-          unit={check.unitLabel}
+          ref={field}
+          label={`Tool’s display, ${check.unitLabel}`}
           value={entry.text.toolValue}
           readOnly={entry.unanswered}
           error={entry.errors.toolValue}
           onChange={(event) => entry.type('toolValue', event.target.value)}
+          className={BIG_NUMBER}
           onKeyDown={(event) => {
             // With the tester's value still to come, Enter goes on to it.
             if (event.key !== 'Enter' || !needs.value || entry.text.value !== '') return;
             event.preventDefault();
-            event.currentTarget.form?.querySelector<HTMLInputElement>('#tester-value')?.focus();
+            event.currentTarget.form?.querySelector<HTMLInputElement>(`#${TESTER_VALUE}`)?.focus();
           }}
-          className="min-h-16 text-4xl"
         />
       )}
       {needs.value && (
-        <div className="flex items-end gap-3">
-          <NumberInput
-            ref={needs.toolValue ? undefined : field}
-            id="tester-value"
-            data-number
-            size="big"
-            label="Tester shows"
-            value={entry.text.value}
-            readOnly={entry.unanswered}
-            error={entry.errors.value}
-            onChange={(event) => entry.type('value', event.target.value)}
-            fieldClassName="flex-1 min-w-0"
-            className="min-h-16 text-4xl"
-          />
-          <select
-            aria-label="Unit of the tester’s display"
-            value={unit}
-            onChange={(event) => onUnit(TORQUE_UNITS.find((one) => one === event.target.value)!)}
-            className={controlClass + ' min-h-16 max-w-26'}
-          >
-            {TORQUE_UNITS.map((one) => (
-              <option key={one} value={one}>
-                {unitText(one)}
-              </option>
-            ))}
-          </select>
-        </div>
+        <TesterValue
+          field={needs.toolValue ? undefined : field}
+          entry={entry}
+          unit={unit}
+          onUnit={onUnit}
+        />
       )}
+      <Button
+        ref={button}
+        type="submit"
+        size="big"
+        pending={entry.pending}
+        onKeyDown={onceOnly}
+        className={clsx(fields !== 1 && entry.doubt === null && 'col-span-2', 'min-h-17')}
+      >
+        {words}
+      </Button>
       {entry.doubt !== null && (
-        <Notice kind="problem" title={entry.doubt}>
-          <Kbd>Enter</Kbd> again to take it, <Kbd>Esc</Kbd> to retype.
-        </Notice>
-      )}
-      {entry.unanswered && (
-        <Notice kind="problem" title="No answer from the post">
-          What you typed is kept. <Kbd>Enter</Kbd> sends it again; it is never taken twice.
-        </Notice>
-      )}
-      <ProblemNotice errors={[entry.refusal]} />
-      <div className="flex gap-3">
-        <Button
-          ref={button}
-          type="submit"
-          size="big"
-          wide
-          pending={entry.pending}
-          onKeyDown={onceOnly}
-        >
-          {entry.unanswered
-            ? 'Send again'
-            : entry.doubt !== null
-              ? 'Take it all the same'
-              : BUTTON_WORDS[needs.verb]}
+        <Button variant="secondary" size="big" onClick={entry.retype} className="min-h-17">
+          Retype
         </Button>
-        {entry.doubt !== null && (
-          <Button variant="secondary" size="big" onClick={entry.retype}>
-            Retype
-          </Button>
-        )}
-      </div>
+      )}
     </form>
   );
 }

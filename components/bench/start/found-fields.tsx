@@ -2,8 +2,7 @@
 
 import { Fieldset } from '../../ui/fieldset';
 import { NumberInput } from '../../ui/number-input';
-import { RadioCards, type RadioCardOption } from '../../ui/radio-cards';
-import { Select } from '../../ui/select';
+import { Select, type SelectOption } from '../../ui/select';
 import { TextInput } from '../../ui/text-input';
 import { fieldWords } from './field-words';
 import type { StartFormApi } from './start-schema';
@@ -34,7 +33,7 @@ export function FoundFields({ form, scheme, consent, planName, unitLabel }: Foun
   const { register, formState } = form;
   const error = (path: string) => fieldWords(formState.errors, path);
   const isBound = consent === 'working';
-  const schemes: RadioCardOption[] = [
+  const schemes: SelectOption[] = [
     { value: 'standard', label: planName, disabled: isBound },
     { value: 'working', label: 'Working points only' },
     { value: 'short', label: 'Short check, three pulls a point', disabled: isBound },
@@ -87,12 +86,11 @@ export function FoundFields({ form, scheme, consent, planName, unitLabel }: Foun
           error={error('asFound.damage')}
         />
       </Fieldset>
-      <RadioCards
+      <Select
         {...register('scheme')}
-        legend="What is pulled"
+        label="What is pulled"
         hint={isBound ? 'The visitor agreed to working points only.' : undefined}
         options={schemes}
-        defaultValue={scheme}
         error={error('scheme')}
       />
       {scheme === 'working' && (

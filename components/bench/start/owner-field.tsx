@@ -14,16 +14,16 @@ interface OwnerFieldProps {
 /** Whose tool it is: the tag on the tool, the ticket and the person belong together. */
 export function OwnerField({ form, tag }: OwnerFieldProps) {
   const { register, formState } = form;
-  const whose = tag.visitorName ? `${tag.visitorName}’s tool` : 'the tool of this visitor';
+  const whose = tag.visitorName ? `${tag.visitorName}’s tool` : 'this visitor’s';
   return (
-    <div className="flex flex-col gap-2">
-      <ToolLine tag={tag} />
+    <div className="flex flex-col gap-1">
+      <ToolLine tag={tag} size="middle" />
       <Checkbox
         {...register('ownerConfirmed')}
         autoFocus
         label={
           <strong>
-            Ticket and paper tag both say {tag.code}, and it is {whose}
+            Ticket and tag say {tag.code}; it is {whose}
           </strong>
         }
         error={fieldWords(formState.errors, 'ownerConfirmed')}

@@ -15,10 +15,10 @@ import type { StartFormApi } from './start-schema';
 
 const KINDS = TOOL_CLASSES.map((toolClass) => ({
   value: toolClass,
-  label: `${toolKindWords(toolClass)} (${toolClass})`,
+  label: `${toolKindWords(toolClass)}${toolClass === 'I-C' ? ' or adapter' : ''} (${toolClass})`,
 }));
 const UNITS = TORQUE_UNITS.map((unit) => ({ value: unit, label: unitText(unit) }));
-const CLAIM_WORDS = { reading: 'of reading', 'full-scale': 'of full scale' };
+const CLAIM_WORDS = { reading: 'reading', 'full-scale': 'full scale' };
 const CLAIMS = CLAIM_KINDS.map((kind) => ({ value: kind, label: CLAIM_WORDS[kind] }));
 
 interface PlateFieldsProps {
@@ -40,11 +40,10 @@ export function PlateFields({ form, toolClass }: PlateFieldsProps) {
     },
   });
   return (
-    <Fieldset heading legend="What its plate says">
+    <Fieldset heading legend="What its plate says" className="gap-2">
       <Select
         {...kind}
         label="Kind and class"
-        hint="An adapter between driver and socket is an electronic wrench."
         placeholder="Choose the kind"
         options={KINDS}
         error={error('tool.toolClass')}
@@ -59,42 +58,39 @@ export function PlateFields({ form, toolClass }: PlateFieldsProps) {
           error={error('tool.unit')}
         />
       </div>
-      <div className="grid grid-cols-2 gap-3">
+      {known && isFixedTool(known) && (
+        <NumberInput
+          {...register('tool.nominal')}
+          label="Preset value"
+          error={error('tool.nominal')}
+        />
+      )}
+      <div className="grid grid-cols-[1fr_1fr_1fr_8rem] gap-3">
         <NumberInput
           {...register('tool.division')}
-          label="Scale division"
-          optional
+          label="Division"
           error={error('tool.division')}
         />
-        {known && isFixedTool(known) && (
-          <NumberInput
-            {...register('tool.nominal')}
-            label="Preset value"
-            error={error('tool.nominal')}
-          />
-        )}
-      </div>
-      <div className="grid grid-cols-[1fr_1fr_9rem] gap-3">
         <NumberInput
           {...register('tool.claim.cwPercent')}
-          label="Claims ± %"
+          label="Claim ±%"
           error={error('tool.claim.cwPercent')}
         />
         <NumberInput
           {...register('tool.claim.ccwPercent')}
-          label="Counter-cw"
+          label="ccw ±%"
           error={error('tool.claim.ccwPercent')}
         />
         <Select
           {...register('tool.claim.of')}
-          label="Per cent"
+          label="of its"
           options={CLAIMS}
           error={error('tool.claim.of')}
         />
       </div>
       <Checkbox
         {...register('tool.measuresCcw')}
-        label="Owner or plate say that it measures counter-clockwise"
+        label="Owner or plate: also counter-clockwise"
         defaultChecked={getValues('tool.measuresCcw')}
       />
       <div className="grid grid-cols-3 gap-3">

@@ -86,9 +86,9 @@ export function StartForm({ tag, tool }: StartFormProps) {
       noValidate
       onSubmit={submit}
       onKeyDown={onEnter}
-      className="grid gap-x-8 gap-y-5 p-5 lg:grid-cols-3"
+      className="grid gap-x-8 gap-y-5 px-5 py-3 lg:grid-cols-3"
     >
-      <div className="flex min-w-0 flex-col gap-4">
+      <div className="flex min-w-0 flex-col gap-1">
         <OwnerField form={form} tag={tag} />
         <PlateFields form={form} toolClass={values.tool.toolClass} />
       </div>
