@@ -11,6 +11,8 @@ export default defineConfig({
   forbidOnly: true,
   use: {
     browserName: 'chromium',
+    actionTimeout: 20_000,
+    navigationTimeout: 30_000,
     launchOptions: {
       executablePath: process.env.CHROMIUM || '/usr/bin/chromium',
       args: [

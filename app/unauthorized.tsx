@@ -1,5 +1,5 @@
 import type { Metadata } from 'next';
-import { ButtonLink } from '@/components/ui/button';
+import { ButtonLink } from '@/components/ui/button-link';
 
 export const metadata: Metadata = { title: 'Sign in first' };
 

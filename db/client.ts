@@ -46,16 +46,19 @@ async function openPostgres(url: string): Promise<Store> {
 }
 
 async function openPglite(options: Exclude<StoreOptions, { kind: 'postgres' }>): Promise<Store> {
-  const [{ PGlite }, { drizzle }, { migrate }] = await Promise.all([
-    import('@electric-sql/pglite'),
+  const [{ openForDrizzle }, { drizzle }, { migrate }] = await Promise.all([
+    import('./pglite'),
     import('drizzle-orm/pglite'),
     import('drizzle-orm/pglite/migrator'),
   ]);
   if (options.kind === 'folder') makeFolder(options.dataDir);
-  const client =
+  const client = await openForDrizzle(
     options.kind === 'folder'
-      ? await PGlite.create(options.dataDir)
-      : await PGlite.create(options.kind === 'dump' ? { loadDataDir: options.dump } : {});
+      ? { dataDir: options.dataDir }
+      : options.kind === 'dump'
+        ? { loadDataDir: options.dump }
+        : {},
+  );
   const db = drizzle({ client, schema });
   if (options.kind !== 'dump') await migrate(db, { migrationsFolder: MIGRATIONS });
   if (options.kind !== 'folder') {

@@ -21,7 +21,7 @@ export function BenchBanners({ room, notice, onDismiss }: BenchBannersProps) {
   const isLost = instrument?.state === 'lost';
   if (room.connected && !room.refused && !isLost && !notice) return null;
   return (
-    <div className="flex flex-col gap-2 px-6 pt-3">
+    <section aria-label="News of the bench" className="flex flex-col gap-2 px-6 pt-3">
       {room.refused !== null && (
         <Notice kind="problem" title="The post does not show this bench any more">
           {room.refused} Reload the page to sign in again.
@@ -52,7 +52,7 @@ export function BenchBanners({ room, notice, onDismiss }: BenchBannersProps) {
           </Button>
         </div>
       )}
-    </div>
+    </section>
   );
 }
 

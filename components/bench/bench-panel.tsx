@@ -21,7 +21,7 @@ export function BenchPanel({ title, onClose, children }: BenchPanelProps) {
   return (
     <section
       aria-labelledby={headingId}
-      className="border-fore bg-ground flex flex-col gap-4 rounded-lg border-2 p-5"
+      className="border-fore bg-ground flex flex-col gap-3 rounded-lg border-2 px-5 py-4"
     >
       <header className="flex items-start justify-between gap-4">
         <h2

@@ -16,30 +16,32 @@ export function KeyBar({ actions }: { actions: readonly BenchAction[] }) {
   useKeys(actions);
   const shown = actions.filter(({ keyOnly }) => !keyOnly);
   return (
-    <div
-      role="toolbar"
-      aria-label="What you can do now"
-      className="border-line flex min-h-16 flex-wrap items-center gap-x-1 border-t px-3 py-1"
-    >
-      {shown.map((action) => (
-        <button
-          key={action.key}
-          type="button"
-          aria-disabled={action.disabled || undefined}
-          aria-keyshortcuts={keyWords(action.key)}
-          onClick={(event) => {
-            letGo(event);
-            if (!action.disabled) action.run();
-          }}
-          className={clsx(
-            'inline-flex min-h-13 items-center gap-2 rounded-lg px-3 whitespace-nowrap',
-            'aria-disabled:cursor-default aria-disabled:opacity-60',
-            action.atEnd && 'ml-auto',
-          )}
-        >
-          <Kbd>{keyWords(action.key)}</Kbd> {action.label}
-        </button>
-      ))}
-    </div>
+    <footer>
+      <div
+        role="toolbar"
+        aria-label="What you can do now"
+        className="border-line flex min-h-16 flex-wrap items-center gap-x-1 border-t px-3 py-1"
+      >
+        {shown.map((action) => (
+          <button
+            key={action.key}
+            type="button"
+            aria-disabled={action.disabled || undefined}
+            aria-keyshortcuts={keyWords(action.key)}
+            onClick={(event) => {
+              letGo(event);
+              if (!action.disabled) action.run();
+            }}
+            className={clsx(
+              'inline-flex min-h-13 items-center gap-2 rounded-lg px-3 whitespace-nowrap',
+              'aria-disabled:cursor-default aria-disabled:opacity-60',
+              action.atEnd && 'ml-auto',
+            )}
+          >
+            <Kbd>{keyWords(action.key)}</Kbd> {action.label}
+          </button>
+        ))}
+      </div>
+    </footer>
   );
 }

@@ -39,7 +39,10 @@ export function NotMinePhase() {
         )}
         {isBlocked ? (
           <p className="text-xl">
-            They leave the bench, or a lead takes it over. <Link href="/bench">Other benches</Link>
+            They leave the bench, or a lead takes it over.{' '}
+            <Link href="/bench" className="inline-flex min-h-12 items-center underline">
+              Other benches
+            </Link>
           </p>
         ) : (
           <Button size="big" className="self-start" pending={take.isPending} onClick={takeIt}>

@@ -55,7 +55,12 @@ export function ReadyPhase({ tag, record }: ReadyPhaseProps) {
                 <VerdictHeading verdict={record.verdict} words={record.statement} level={2} />
                 <p className="text-fore-quiet">
                   Signed off as {record.number}.{' '}
-                  <a href={record.path} target="_blank" rel="noreferrer" className="underline">
+                  <a
+                    href={record.path}
+                    target="_blank"
+                    rel="noreferrer"
+                    className="inline-flex min-h-12 items-center underline"
+                  >
                     Open the record
                   </a>
                 </p>

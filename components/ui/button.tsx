@@ -1,5 +1,4 @@
 import clsx from 'clsx';
-import Link from 'next/link';
 import type { ComponentProps, ReactNode } from 'react';
 import { WarningShape } from './warning-shape';
 
@@ -7,7 +6,7 @@ export type ButtonVariant = 'primary' | 'secondary' | 'quiet' | 'danger';
 /** `big` is for gloves: at least 64 px high. */
 export type ButtonSize = 'normal' | 'big';
 
-interface ButtonLook {
+export interface ButtonLook {
   variant?: ButtonVariant;
   size?: ButtonSize;
   /** Takes the width of its column. */
@@ -72,15 +71,4 @@ export function Button({
       {pending && pendingLabel !== undefined ? pendingLabel : children}
     </button>
   );
-}
-
-/** A link that looks like a button; goes through Next's router. */
-export function ButtonLink({
-  variant = 'primary',
-  size = 'normal',
-  wide,
-  className,
-  ...rest
-}: ButtonLook & ComponentProps<typeof Link>) {
-  return <Link {...rest} className={clsx(buttonClass({ variant, size, wide }), className)} />;
 }

@@ -1,13 +1,24 @@
+// Making a formatter takes some 0.2 ms, and a running check asks for its day at every pull.
+const formatters = new Map<string, Intl.DateTimeFormat>();
+
+function formatterOf(timeZone: string): Intl.DateTimeFormat {
+  const known = formatters.get(timeZone);
+  if (known) return known;
+  const formatter = new Intl.DateTimeFormat('en-GB', {
+    timeZone,
+    hourCycle: 'h23',
+    year: 'numeric',
+    month: '2-digit',
+    day: '2-digit',
+    hour: '2-digit',
+  });
+  formatters.set(timeZone, formatter);
+  return formatter;
+}
+
 const parts = (instant: Date, timeZone: string): Record<string, string> =>
   Object.fromEntries(
-    new Intl.DateTimeFormat('en-GB', {
-      timeZone,
-      hourCycle: 'h23',
-      year: 'numeric',
-      month: '2-digit',
-      day: '2-digit',
-      hour: '2-digit',
-    })
+    formatterOf(timeZone)
       .formatToParts(instant)
       .map((part) => [part.type, part.value]),
   );

@@ -4,7 +4,7 @@ import { AddBench } from '@/components/desk/admin/add-bench';
 import { AdminPage } from '@/components/desk/admin/admin-page';
 import { BenchCard } from '@/components/desk/admin/bench-card';
 import { MeetPicker } from '@/components/desk/meet-picker';
-import { ButtonLink } from '@/components/ui/button';
+import { ButtonLink } from '@/components/ui/button-link';
 import { EmptyState } from '@/components/ui/empty-state';
 import { Notice } from '@/components/ui/notice';
 import { MAX_BENCHES } from '@/lib/desk/meet';

@@ -1,7 +1,7 @@
 import type { Metadata } from 'next';
 import { AdminPage } from '@/components/desk/admin/admin-page';
 import { MeetsTable } from '@/components/desk/admin/meets-table';
-import { ButtonLink } from '@/components/ui/button';
+import { ButtonLink } from '@/components/ui/button-link';
 import { meetList } from '@/server/queries/meets/list';
 import { getRuntime } from '@/server/runtime';
 import { enterDesk } from '../enter';

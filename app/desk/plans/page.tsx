@@ -3,7 +3,7 @@ import { AdminPage } from '@/components/desk/admin/admin-page';
 import { BasisExplained } from '@/components/desk/admin/basis-explained';
 import { PlanForm } from '@/components/desk/admin/plan-form';
 import { MeetPicker } from '@/components/desk/meet-picker';
-import { ButtonLink } from '@/components/ui/button';
+import { ButtonLink } from '@/components/ui/button-link';
 import { EmptyState } from '@/components/ui/empty-state';
 import { Panel } from '@/components/ui/panel';
 import { meetDetails } from '@/server/queries/meets/details';

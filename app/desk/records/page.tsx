@@ -3,7 +3,7 @@ import { DeskPage } from '@/components/desk/desk-page';
 import { MeetPicker } from '@/components/desk/meet-picker';
 import { Pages } from '@/components/desk/pages';
 import { RecordsTable } from '@/components/desk/records/records-table';
-import { ButtonLink } from '@/components/ui/button';
+import { ButtonLink } from '@/components/ui/button-link';
 import { EmptyState } from '@/components/ui/empty-state';
 import { meetBySlug } from '@/server/queries/meet/public';
 import { recordsOfMeet } from '@/server/queries/records/list';

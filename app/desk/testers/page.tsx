@@ -1,7 +1,7 @@
 import type { Metadata } from 'next';
 import { AdminPage } from '@/components/desk/admin/admin-page';
 import { TestersTable } from '@/components/desk/admin/testers-table';
-import { ButtonLink } from '@/components/ui/button';
+import { ButtonLink } from '@/components/ui/button-link';
 import { EmptyState } from '@/components/ui/empty-state';
 import { testerList } from '@/server/queries/testers/list';
 import { getRuntime } from '@/server/runtime';

@@ -45,12 +45,8 @@ export function ReadingEntry(props: ReadingEntryProps) {
     event.preventDefault();
     entry.submit();
   };
-  const words =
-    entry.doubt !== null
-      ? 'Take it all the same'
-      : entry.unanswered
-        ? 'Send again'
-        : BUTTON_WORDS[needs.verb];
+  const doubted = entry.doubt !== null;
+  const words = doubted ? 'Take it' : entry.unanswered ? 'Send again' : BUTTON_WORDS[needs.verb];
   const fields = Number(needs.value) + Number(needs.toolValue);
   return (
     <form
@@ -59,7 +55,7 @@ export function ReadingEntry(props: ReadingEntryProps) {
       noValidate
       className={clsx(
         'grid items-end gap-3',
-        fields === 1 && entry.doubt === null ? 'grid-cols-[minmax(0,1fr)_auto]' : 'grid-cols-2',
+        fields === 1 ? 'grid-cols-[minmax(0,1fr)_auto]' : 'grid-cols-2',
       )}
     >
       {needs.toolValue && (
@@ -88,21 +84,35 @@ export function ReadingEntry(props: ReadingEntryProps) {
           onUnit={onUnit}
         />
       )}
-      <Button
-        ref={button}
-        type="submit"
-        size="big"
-        pending={entry.pending}
-        onKeyDown={onceOnly}
-        className={clsx(fields !== 1 && entry.doubt === null && 'col-span-2', 'min-h-17')}
+      <div
+        className={clsx(
+          'flex gap-2',
+          fields === 1 && doubted ? 'flex-col' : fields !== 1 && 'col-span-2',
+        )}
       >
-        {words}
-      </Button>
-      {entry.doubt !== null && (
-        <Button variant="secondary" size="big" onClick={entry.retype} className="min-h-17">
-          Retype
+        <Button
+          ref={button}
+          type="submit"
+          size="big"
+          wide
+          pending={entry.pending}
+          onKeyDown={onceOnly}
+          className={doubted && fields === 1 ? 'min-h-14! py-1!' : 'min-h-17'}
+        >
+          {words}
         </Button>
-      )}
+        {doubted && (
+          <Button
+            variant="secondary"
+            size="big"
+            wide
+            onClick={entry.retype}
+            className={fields === 1 ? 'min-h-14! py-1!' : 'min-h-17'}
+          >
+            Retype
+          </Button>
+        )}
+      </div>
     </form>
   );
 }

@@ -90,7 +90,7 @@ export function VoidPanel({ check, pullId, onClose }: VoidPanelProps) {
       </div>
       {isAllowed ? (
         <form
-          className="flex flex-col gap-4"
+          className="flex flex-col gap-3"
           onSubmit={(event) => {
             event.preventDefault();
             submit();
@@ -107,7 +107,7 @@ export function VoidPanel({ check, pullId, onClose }: VoidPanelProps) {
                 type="button"
                 aria-pressed={fault === one}
                 onClick={() => setFault(one)}
-                className="border-control aria-pressed:border-fore aria-pressed:ring-fore flex min-h-14 items-center gap-3 rounded-lg border-2 px-3 text-left leading-tight font-semibold aria-pressed:ring-2"
+                className="border-control aria-pressed:border-fore aria-pressed:ring-fore flex min-h-13 items-center gap-3 rounded-lg border-2 px-3 text-left leading-tight font-semibold aria-pressed:ring-2"
               >
                 <Kbd>{index + 1}</Kbd> {VOID_FAULT_LABELS[one]}
               </button>

@@ -6,7 +6,8 @@ import { useCommand } from '@/components/live/use-command';
 import { Notice } from '@/components/ui/notice';
 import { Panel } from '@/components/ui/panel';
 import { Select } from '@/components/ui/select';
-import { Button, ButtonLink } from '@/components/ui/button';
+import { Button } from '@/components/ui/button';
+import { ButtonLink } from '@/components/ui/button-link';
 
 export interface BenchCardView {
   id: string;

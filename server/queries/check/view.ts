@@ -1,6 +1,6 @@
 import { deliveredWords } from '@/lib/format/measured';
 import type { CheckView, CorridorPoint, PullView } from '@/lib/live/contract';
-import { evaluateCheck, type CheckEvaluation, type PointEvaluation } from '@/lib/torque/check';
+import { evaluateCheck, type PointEvaluation } from '@/lib/torque/check';
 import { relativeDeviation } from '@/lib/torque/deviation';
 import { VOID_FAULT_LABELS } from '@/lib/torque/faults';
 import type { CheckPlan } from '@/lib/torque/plan';
@@ -89,10 +89,9 @@ function pullView(file: CheckFile, one: PullFile): PullView {
 }
 
 /** A check as the bench sees it, all derived from its file. */
-export function checkView(
-  file: CheckFile,
-  evaluation: CheckEvaluation = evaluateCheck(factsOf(file)),
-): CheckView {
+export function checkView(file: CheckFile): CheckView {
+  const facts = factsOf(file);
+  const evaluation = evaluateCheck(facts);
   const { check, tool } = file;
   const { plan } = check;
   const division = tool.unit === plan.unit ? tool.division : null;
@@ -111,7 +110,7 @@ export function checkView(
     unitLabel: unitText(plan.unit),
     basis: plan.basis,
     planName: plan.schemeName,
-    barred: factsOf(file).barred.map(reasonWords),
+    barred: facts.barred.map(reasonWords),
     step,
     offered,
     offeredStep,

@@ -25,10 +25,9 @@ const openTags = (reader: Reader, meetId: string) =>
       position: tags.position,
       heldUntil: tags.heldUntil,
       calledAt: tags.calledAt,
-      tool: tools,
+      toolId: tags.toolId,
     })
     .from(tags)
-    .innerJoin(tools, eq(tools.id, tags.toolId))
     .where(
       and(
         eq(tags.meetId, meetId),
@@ -45,6 +44,17 @@ const openTags = (reader: Reader, meetId: string) =>
       ),
     )
     .orderBy(asc(tags.position));
+
+/** The tools that lie on a bench: the line shows no other tool, and it can be long. */
+async function toolsOnBenches(
+  reader: Reader,
+  line: OpenTag[],
+): Promise<Map<string, typeof tools.$inferSelect>> {
+  const ids = line.filter((tag) => tag.place === 'bench').map((tag) => tag.toolId);
+  if (ids.length === 0) return new Map();
+  const rows = await reader.select().from(tools).where(inArray(tools.id, ids));
+  return new Map(rows.map((tool) => [tool.id, tool]));
+}
 
 interface RunningCheck {
   benchId: string;
@@ -102,9 +112,11 @@ const todaysVerdicts = (reader: Reader, meet: typeof meets.$inferSelect, now: Da
 function benchOf(
   bench: Pick<typeof benches.$inferSelect, 'id' | 'number' | 'state'>,
   line: OpenTag[],
+  toolsById: ReadonlyMap<string, typeof tools.$inferSelect>,
   running: RunningCheck[],
 ): LineBench {
   const lying = line.find((tag) => tag.benchId === bench.id && tag.place === 'bench');
+  const tool = lying && toolsById.get(lying.toolId);
   const called = line.find((tag) => tag.benchId === bench.id && tag.state === 'called');
   const check = running.find((row) => row.benchId === bench.id);
   const words = (): string => {
@@ -123,7 +135,7 @@ function benchOf(
     id: bench.id,
     number: bench.number,
     state: bench.state,
-    tag: lying ? { code: lying.code, state: lying.state, tool: tagLine(lying.tool) } : null,
+    tag: lying && tool ? { code: lying.code, state: lying.state, tool: tagLine(tool) } : null,
     called: called
       ? { code: called.code, calledAt: (called.calledAt ?? new Date(0)).toISOString() }
       : null,
@@ -143,6 +155,7 @@ export async function lineSnapshot(
   const [meet] = await reader.select().from(meets).where(eq(meets.id, meetId));
   if (!meet) return null;
   const line = await openTags(reader, meetId);
+  const toolsById = await toolsOnBenches(reader, line);
   const running = await runningChecks(reader, meetId);
   const verdicts = await todaysVerdicts(reader, meet, now);
   const rows = await reader
@@ -163,7 +176,7 @@ export async function lineSnapshot(
     meetName: meet.name,
     timeZone: meet.timeZone,
     joinOpen: meet.joinOpen,
-    benches: rows.map((bench) => benchOf(bench, line, running)),
+    benches: rows.map((bench) => benchOf(bench, line, toolsById, running)),
     waiting: waitingOrder(line).map((tag) => ({
       code: tag.code,
       held: tag.heldUntil !== null && tag.heldUntil > now,

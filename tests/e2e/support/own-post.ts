@@ -28,19 +28,19 @@ export async function setUp(browser: Browser, post: RunningPost): Promise<Browse
   await page.goto('/');
   await expect(page).toHaveURL(/\/set-up$/);
   await page.getByLabel('Set-up code').fill('AAAA-AAAA');
-  await page.getByLabel('Name', { exact: true }).first().fill('Harrow Lea Post');
+  await page.getByLabel('Name of the post').fill('Harrow Lea Post');
   await page.getByLabel('Short name').fill('HL');
   await page.getByLabel('Your name').fill(OWNER.name);
   await page.getByLabel('Sign-in name').fill(OWNER.login);
   await page.getByLabel('Password').fill(OWNER.password);
-  await page.getByLabel('Name', { exact: true }).last().fill(MEET.name);
+  await page.getByLabel('Name of the meet').fill(MEET.name);
   await page.getByLabel('Place').fill(MEET.place);
   await page.getByLabel('First day').fill(day(-1));
   await page.getByLabel('Last day').fill(day(1));
-  await page.getByLabel('Time zone').fill('Europe/London');
+  await page.getByLabel('Time zone').selectOption('Europe/London');
   await page.getByLabel('Benches').fill('2');
-  const send_ = page.getByRole('button', { name: 'Set up' });
-  await send_.click();
+  const submit = page.getByRole('button', { name: 'Set up' });
+  await submit.click();
   await expect(
     page
       .getByText(/code/i)
@@ -49,7 +49,7 @@ export async function setUp(browser: Browser, post: RunningPost): Promise<Browse
   ).toBeVisible();
   await page.getByLabel('Set-up code').fill(post.setupCode!);
   await page.getByLabel('Password').fill(OWNER.password);
-  await send_.click();
+  await submit.click();
   await expect(page).not.toHaveURL(/set-up/);
   await page.close();
   return context;

@@ -5,7 +5,7 @@ import { LockForm } from '@/components/desk/admin/lock-form';
 import { ProofForm } from '@/components/desk/admin/proof-form';
 import { ProofList } from '@/components/desk/admin/proof-list';
 import { TesterFacts } from '@/components/desk/admin/tester-facts';
-import { ButtonLink } from '@/components/ui/button';
+import { ButtonLink } from '@/components/ui/button-link';
 import { Disclosure } from '@/components/ui/disclosure';
 import { Notice } from '@/components/ui/notice';
 import { Panel } from '@/components/ui/panel';
