@@ -39,13 +39,15 @@ export function ReasonPanel({
 }: ReasonPanelProps) {
   const [text, setText] = useState('');
   const [missing, setMissing] = useState(false);
+  // A number that was meant for another field is no reason.
+  const isEnough = /\p{L}/u.test(text) || (optional && text.trim() === '');
   const submit = (event: FormEvent) => {
     event.preventDefault();
     if (pending) return;
-    setMissing(!optional && text.trim() === '');
-    if (optional || text.trim() !== '') onSubmit(text.trim());
+    setMissing(!isEnough);
+    if (isEnough) onSubmit(text.trim());
   };
-  const problem = missing && text.trim() === '' ? 'A few words, please.' : error?.problem.detail;
+  const problem = missing && !isEnough ? 'A few words, please.' : error?.problem.detail;
   return (
     <BenchPanel title={title} onClose={onClose}>
       <form onSubmit={submit} className="flex flex-col gap-4">

@@ -54,8 +54,8 @@ describe('readEntry', () => {
   it('says what is wrong with each field, and looks at no tolerance', () => {
     expect(readEntry({ value: 'two', toolValue: '' }, needs)).toEqual({
       errors: {
-        value: 'A number, such as 201.6.',
-        toolValue: 'Type what the tool’s own display showed.',
+        value: 'This is no number.',
+        toolValue: 'Type this value.',
       },
     });
     expect(readEntry({ value: '-3', toolValue: '204' }, needs)).toEqual({

@@ -41,11 +41,6 @@ export interface EntryNumbers {
 
 export type EntryErrors = Partial<Record<keyof EntryText, string>>;
 
-const WHAT: Record<keyof EntryText, string> = {
-  value: 'what the tester shows',
-  toolValue: 'what the tool’s own display showed',
-};
-
 /** The typed text as numbers, or what is wrong with each field. The post checks all of it again. */
 export function readEntry(
   text: EntryText,
@@ -56,8 +51,8 @@ export function readEntry(
   for (const field of ['value', 'toolValue'] as const) {
     if (!needs[field]) continue;
     const number = parseDecimal(text[field]);
-    if (number === null) errors[field] = `Type ${WHAT[field]}.`;
-    else if (Number.isNaN(number)) errors[field] = 'A number, such as 201.6.';
+    if (number === null) errors[field] = 'Type this value.';
+    else if (Number.isNaN(number)) errors[field] = 'This is no number.';
     else if (number < 0) errors[field] = 'A torque is not negative.';
     numbers[field] = number;
   }

@@ -2,11 +2,12 @@ import type { CheckView } from '@/lib/live/contract';
 import type { BenchAction } from '../keys';
 import type { CheckPanel } from './check-panels';
 import type { EntryNeeds } from './entry';
+import type { Entry } from './use-entry';
 
 interface PullActionsInput {
   check: Pick<CheckView, 'offered' | 'paused' | 'pulls' | 'setting' | 'step'>;
   needs: EntryNeeds | null;
-  entry: { doubt: string | null; submit: () => void; retype: () => void; pending: boolean };
+  entry: Pick<Entry, 'doubt' | 'submit' | 'retype' | 'pending' | 'unanswered' | 'text'>;
   isSimulated: boolean;
   /** The tester sends its values without being typed. */
   sendsItself: boolean;
@@ -22,6 +23,7 @@ interface PullActionsInput {
 export function pullActions(input: PullActionsInput): BenchAction[] {
   const { check, needs, entry, busy, open } = input;
   const isReading = check.step?.kind === 'reading' && !check.offered;
+  const isTyped = entry.text.value !== '' || entry.text.toolValue !== '';
   const actions: (BenchAction | false)[] = [
     needs !== null && {
       key: 'enter',
@@ -60,8 +62,9 @@ export function pullActions(input: PullActionsInput): BenchAction[] {
       run: input.onPause,
       disabled: busy,
     },
-    entry.doubt !== null
-      ? { key: 'escape', label: 'retype', run: entry.retype }
+    // What is typed is let go first: no second press of Esc ends a check by accident.
+    isTyped || entry.doubt !== null
+      ? { key: 'escape', label: 'retype', run: entry.retype, disabled: entry.unanswered }
       : { key: 'escape', label: 'stop early', run: () => open({ kind: 'stop' }) },
     { key: 'a', label: 'give up', run: () => open({ kind: 'abandon' }) },
     { key: '?', label: 'all keys', run: () => open({ kind: 'keys' }), atEnd: true },

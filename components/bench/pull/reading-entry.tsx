@@ -47,6 +47,7 @@ export function ReadingEntry(props: ReadingEntryProps) {
   };
   const doubted = entry.doubt !== null;
   const words = doubted ? 'Take it' : entry.unanswered ? 'Send again' : BUTTON_WORDS[needs.verb];
+  const goesOn = needs.value && entry.text.toolValue !== '' && entry.text.value === '';
   const fields = Number(needs.value) + Number(needs.toolValue);
   return (
     <form
@@ -54,7 +55,7 @@ export function ReadingEntry(props: ReadingEntryProps) {
       onKeyDown={onceOnly}
       noValidate
       className={clsx(
-        'grid items-end gap-3',
+        'grid gap-3',
         fields === 1 ? 'grid-cols-[minmax(0,1fr)_auto]' : 'grid-cols-2',
       )}
     >
@@ -62,7 +63,9 @@ export function ReadingEntry(props: ReadingEntryProps) {
         <NumberInput
           data-number
           ref={field}
-          label={`Tool’s display, ${check.unitLabel}`}
+          label={
+            <span className="flex min-h-12 items-center">Tool’s display, {check.unitLabel}</span>
+          }
           value={entry.text.toolValue}
           readOnly={entry.unanswered}
           error={entry.errors.toolValue}
@@ -70,7 +73,7 @@ export function ReadingEntry(props: ReadingEntryProps) {
           className={BIG_NUMBER}
           onKeyDown={(event) => {
             // With the tester's value still to come, Enter goes on to it.
-            if (event.key !== 'Enter' || !needs.value || entry.text.value !== '') return;
+            if (event.key !== 'Enter' || !goesOn) return;
             event.preventDefault();
             event.currentTarget.form?.querySelector<HTMLInputElement>(`#${TESTER_VALUE}`)?.focus();
           }}
@@ -87,7 +90,8 @@ export function ReadingEntry(props: ReadingEntryProps) {
       <div
         className={clsx(
           'flex gap-2',
-          fields === 1 && doubted ? 'flex-col' : fields !== 1 && 'col-span-2',
+          fields !== 1 && 'col-span-2',
+          fields === 1 && (doubted ? 'flex-col' : 'self-start pt-13.5'),
         )}
       >
         <Button
