@@ -84,7 +84,11 @@ export function CertificateForm({ testerId }: { testerId: string }) {
           <div>
             <p className="mb-2 font-semibold">Understood as</p>
             {'points' in parsed ? (
-              <PointsTable points={parsed.points} unit={unit} />
+              <PointsTable
+                caption="Points as they are understood"
+                points={parsed.points}
+                unit={unit}
+              />
             ) : (
               <p className="text-fore-quiet">
                 {points.trim() === '' ? 'Nothing yet.' : parsed.fault}

@@ -38,6 +38,7 @@ export function CertificateList({ certificates }: { certificates: CertificateCar
           <p className="text-fore-quiet">{certificate.traceability}</p>
           <Disclosure summary={`${certificate.points.length} points`}>
             <PointsTable
+              caption={`Points of ${certificate.number}`}
               unit="N.m"
               points={certificate.points.map(({ torqueNm, ...rest }) => ({
                 ...rest,

@@ -3,16 +3,17 @@ import { formatNumber, unitText, type TorqueUnit } from '@/lib/torque/units';
 import { directionWords } from '@/lib/torque/words';
 import { Cell, DataTable, HeadCell, Row } from '@/components/ui/data-table';
 
-/** The points of a certificate; torques in `unit`. */
-export function PointsTable({
-  points,
-  unit,
-}: {
+interface PointsTableProps {
+  /** Names the table: a page may show several. */
+  caption: string;
   points: readonly PrintedPoint[];
   unit: TorqueUnit;
-}) {
+}
+
+/** The points of a certificate; torques in `unit`. */
+export function PointsTable({ caption, points, unit }: PointsTableProps) {
   return (
-    <DataTable caption="Points of the certificate">
+    <DataTable caption={caption}>
       <thead>
         <tr>
           <HeadCell>Direction</HeadCell>

@@ -19,7 +19,7 @@ export function ProofList({ proofs, more }: { proofs: ProofLine[]; more: boolean
   if (proofs.length === 0) return <p className="text-fore-quiet">It was never proved.</p>;
   return (
     <>
-      <DataTable caption="Proofs">
+      <DataTable caption="Proofs, the newest first">
         <thead>
           <tr>
             <HeadCell>When, how</HeadCell>
