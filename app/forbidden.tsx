@@ -9,8 +9,8 @@ export default function Forbidden() {
     <main className="mx-auto flex min-h-dvh max-w-prose flex-col items-start justify-center gap-4 px-5 py-10">
       <h1 className="font-code text-5xl font-semibold">Not open to you</h1>
       <p>
-        You are signed in, but your role cannot see this page. Ask a lead; the owner of the post give
-        you the role.
+        You are signed in, but your role cannot see this page. Ask a lead. Roles are given by the
+        owner of the post.
       </p>
       <div className="flex flex-wrap gap-3">
         <ButtonLink href="/bench">To the benches</ButtonLink>
