@@ -17,6 +17,8 @@ export interface BenchView {
   me: BenchPerson;
   /** The post is heard. */
   connected: boolean;
+  /** Banners take room: what is not needed for the next pull gives way. */
+  crowded: boolean;
 }
 
 const BenchContext = createContext<BenchView | null>(null);

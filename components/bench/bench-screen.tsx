@@ -6,7 +6,7 @@ import type { BenchSnapshot, CheckSnapshot } from '@/lib/live/contract';
 import { QueryProvider } from '../live/query-provider';
 import { Loading } from '../ui/loading';
 import { Announcer } from './announcer';
-import { BenchBanners } from './bench-banners';
+import { BenchBanners, hasBanner } from './bench-banners';
 import { BenchProvider, useBench, type BenchPerson } from './bench-context';
 import { BenchTopBar } from './bench-top-bar';
 import { CalledPhase } from './called-phase';
@@ -48,7 +48,9 @@ function LiveBench({ bench: firstBench, check: firstCheck, me, signOut }: BenchS
   const { bench, room } = live;
   const { check } = live.check;
   return (
-    <BenchProvider value={{ bench, check, me, connected: room.connected }}>
+    <BenchProvider
+      value={{ bench, check, me, connected: room.connected, crowded: hasBanner(live) }}
+    >
       <div className="ground-chalk flex min-h-dvh flex-col lg:h-dvh">
         <BenchTopBar signOut={signOut} />
         <BenchBanners room={room} notice={live.notice} onDismiss={live.dismissNotice} />

@@ -23,7 +23,7 @@ import { WaitingForTester } from './pull/waiting-for-tester';
 
 /** The pulls, one at a time: left what to do, right how it fills up. */
 export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
-  const { bench, connected } = useBench();
+  const { bench, connected, crowded } = useBench();
   const tester = bench.tester;
   const [panel, setPanel] = useState<CheckPanel | null>(null);
   const [typesInstead, setTypesInstead] = useState(false);
@@ -76,8 +76,12 @@ export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
       <TwoColumns
         left={
           <>
-            <ToolLine tag={tag} size="middle" />
-            {step && <Instruction step={step}>{message}</Instruction>}
+            {!crowded && <ToolLine tag={tag} size="middle" />}
+            {step && (
+              <Instruction step={step} code={crowded ? tag.code : null}>
+                {message}
+              </Instruction>
+            )}
             {listens && (
               <WaitingForTester
                 simulated={tester?.kind === 'simulated'}

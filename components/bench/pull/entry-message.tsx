@@ -5,8 +5,16 @@ import { Notice } from '../../ui/notice';
 import { ProblemNotice } from '../problem-notice';
 import type { Entry } from './use-entry';
 
-/** What the post asks or says about the value in hand; null when it has nothing to say. */
-export function entryMessage(entry: Pick<Entry, 'doubt' | 'unanswered' | 'refusal'>) {
+/** The id of the message, for the field that it is about. */
+export const ENTRY_MESSAGE = 'entry-message';
+
+const ERROR_TITLES = { value: 'Tester', toolValue: 'Tool’s display' };
+
+/**
+ * What is to be settled about the value in hand, in the place of the instruction; null when nothing
+ * is. The keys that settle it stand in the key bar too.
+ */
+export function entryMessage(entry: Pick<Entry, 'doubt' | 'unanswered' | 'refusal' | 'errors'>) {
   if (entry.doubt !== null) {
     return (
       <Notice kind="problem" title={entry.doubt}>
@@ -17,8 +25,22 @@ export function entryMessage(entry: Pick<Entry, 'doubt' | 'unanswered' | 'refusa
   if (entry.unanswered) {
     return (
       <Notice kind="problem" title="No answer from the post">
-        What you typed is kept. <Kbd>Enter</Kbd> sends it again; it is never taken twice.
+        It is kept. <Kbd>Enter</Kbd> sends it again, once.
       </Notice>
+    );
+  }
+  const fields = (['toolValue', 'value'] as const).filter((field) => entry.errors[field]);
+  if (fields.length > 0) {
+    return (
+      <div id={ENTRY_MESSAGE}>
+        <Notice kind="problem">
+          {fields.map((field) => (
+            <p key={field}>
+              <strong>{ERROR_TITLES[field]}:</strong> {entry.errors[field]}
+            </p>
+          ))}
+        </Notice>
+      </div>
     );
   }
   return entry.refusal && <ProblemNotice errors={[entry.refusal]} />;

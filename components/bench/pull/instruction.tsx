@@ -28,15 +28,20 @@ function PullBars({ step }: { step: StepView }) {
 interface InstructionProps {
   /** The step in hand: the one of a waiting value, else the one that is due. */
   step: StepView;
+  /** The tag's code, where the tag itself has given way. */
+  code: string | null;
   /** Something to settle first: it stands in the place of the instruction. */
   children?: ReactNode;
 }
 
 /** One big instruction at a time: where we are, the torque, the pull, what to do. */
-export function Instruction({ step, children }: InstructionProps) {
+export function Instruction({ step, code, children }: InstructionProps) {
   return (
     <section aria-label="The pull in hand">
-      <h2 className="text-fore-quiet text-xl leading-tight">{step.heading}</h2>
+      <h2 className="text-fore-quiet text-xl leading-tight">
+        {code !== null && <strong className="text-fore">{code} · </strong>}
+        {step.heading}
+      </h2>
       <p className="font-code flex items-baseline gap-3 leading-none font-bold">
         <span className="text-[6.6rem] leading-[0.98] tracking-tight">{step.targetLabel}</span>
         <span className="text-5xl font-semibold">{step.unitLabel}</span>

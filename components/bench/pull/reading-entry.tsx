@@ -5,10 +5,13 @@ import { useEffect, useRef, type FormEvent, type KeyboardEvent, type RefObject }
 import type { CheckView } from '@/lib/live/contract';
 import type { TorqueUnit } from '@/lib/torque/units';
 import { Button } from '../../ui/button';
-import { NumberInput } from '../../ui/number-input';
+import { BigField } from './big-field';
 import type { EntryNeeds } from './entry';
-import { BIG_NUMBER, TESTER_VALUE, TesterValue } from './tester-value';
+import { UnitChoice } from './unit-choice';
 import type { Entry } from './use-entry';
+
+/** The id of the tester's field, for the Enter that goes on to it. */
+const TESTER_VALUE = 'tester-value';
 
 interface ReadingEntryProps {
   check: CheckView;
@@ -60,17 +63,14 @@ export function ReadingEntry(props: ReadingEntryProps) {
       )}
     >
       {needs.toolValue && (
-        <NumberInput
-          data-number
-          ref={field}
-          label={
-            <span className="flex min-h-12 items-center">Tool’s display, {check.unitLabel}</span>
-          }
+        <BigField
+          id="tool-value"
+          label={`Tool’s display, ${check.unitLabel}`}
+          field={field}
           value={entry.text.toolValue}
           readOnly={entry.unanswered}
-          error={entry.errors.toolValue}
-          onChange={(event) => entry.type('toolValue', event.target.value)}
-          className={BIG_NUMBER}
+          invalid={entry.errors.toolValue !== undefined}
+          onType={(typed) => entry.type('toolValue', typed)}
           onKeyDown={(event) => {
             // With the tester's value still to come, Enter goes on to it.
             if (event.key !== 'Enter' || !goesOn) return;
@@ -80,11 +80,15 @@ export function ReadingEntry(props: ReadingEntryProps) {
         />
       )}
       {needs.value && (
-        <TesterValue
+        <BigField
+          id={TESTER_VALUE}
+          label="Tester shows"
+          aside={<UnitChoice unit={unit} onUnit={onUnit} />}
           field={needs.toolValue ? undefined : field}
-          entry={entry}
-          unit={unit}
-          onUnit={onUnit}
+          value={entry.text.value}
+          readOnly={entry.unanswered}
+          invalid={entry.errors.value !== undefined}
+          onType={(typed) => entry.type('value', typed)}
         />
       )}
       <div
