@@ -29,7 +29,7 @@ export function TwoColumns({ left, right }: { left: ReactNode; right: ReactNode 
       <div className="border-line flex min-h-0 flex-col gap-3.5 overflow-y-auto px-6 py-4 lg:border-r">
         {left}
       </div>
-      <div className="flex min-h-0 flex-col gap-4 overflow-y-auto px-6 py-4">{right}</div>
+      <div className="flex min-h-0 flex-col gap-4 overflow-y-auto px-6 pt-4 pb-3">{right}</div>
     </div>
   );
 }

@@ -20,7 +20,7 @@ export function KeyBar({ actions }: { actions: readonly BenchAction[] }) {
       <div
         role="toolbar"
         aria-label="What you can do now"
-        className="border-line flex min-h-16 flex-wrap items-center gap-x-1 border-t px-3 py-1"
+        className="border-line flex min-h-16 flex-wrap items-center gap-x-1 border-t px-4 py-1"
       >
         {shown.map((action) => (
           <button
@@ -33,7 +33,7 @@ export function KeyBar({ actions }: { actions: readonly BenchAction[] }) {
               if (!action.disabled) action.run();
             }}
             className={clsx(
-              'inline-flex min-h-13 items-center gap-2 rounded-lg px-3 whitespace-nowrap',
+              'inline-flex min-h-13 items-center gap-2 rounded-lg px-2 whitespace-nowrap',
               'aria-disabled:cursor-default aria-disabled:opacity-60',
               action.atEnd && 'ml-auto',
             )}

@@ -31,7 +31,7 @@ export function CorridorSide({ check, step, onChoose }: CorridorSideProps) {
         rows={check.points}
         basis={check.basis}
         size={isRoomy ? 'roomy' : 'compact'}
-        className={isRoomy ? '' : '[&_.corridor]:[--row:2.85rem]'}
+        className={isRoomy ? '' : '[&_.corridor]:[--row:2.8rem]'}
       />
       {step && <PullStrip check={check} step={step} onChoose={onChoose} />}
     </>
