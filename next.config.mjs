@@ -3,6 +3,8 @@ const nextConfig = {
   // Native or WASM-loading packages that must be required at run time, not bundled.
   serverExternalPackages: ['@electric-sql/pglite', '@node-rs/argon2', 'serialport', 'pino', 'pg'],
   poweredByHeader: false,
+  // Passwords are arguments of server actions: they are never printed.
+  logging: { serverFunctions: false },
   reactStrictMode: true,
   experimental: { authInterrupts: true },
   async headers() {

@@ -1,5 +1,6 @@
 import { EventEmitter } from 'node:events';
 import { createServer, type IncomingMessage, type Server, type ServerResponse } from 'node:http';
+import type { Socket } from 'node:net';
 import type { Duplex } from 'node:stream';
 import next from 'next';
 
@@ -7,6 +8,8 @@ export interface WebServer {
   http: Server;
   /** Builds or loads the application; after this, requests are answered. */
   prepare(): Promise<void>;
+  /** Ends every connection, also those of sleeping phones that would keep a closing server open. */
+  cut(): void;
   close(): Promise<void>;
 }
 
@@ -20,6 +23,8 @@ export function createWebServer({ dev, dir }: { dev: boolean; dir: string }): We
   let handle: ((req: IncomingMessage, res: ServerResponse) => Promise<void>) | null = null;
 
   const http = createServer((req, res) => {
+    // Limits count by address: the one on the wire, never one that the client names.
+    req.headers['x-forwarded-for'] = req.socket.remoteAddress;
     if (handle) void handle(req, res);
     else res.writeHead(503, { 'Retry-After': '5' }).end('Starting. Try again in a moment.');
   });
@@ -28,15 +33,24 @@ export function createWebServer({ dev, dir }: { dev: boolean; dir: string }): We
     if (!upgrades.emit('upgrade', req, socket, head)) socket.destroy();
   });
 
+  const connections = new Set<Socket>();
+  http.on('connection', (socket) => {
+    connections.add(socket);
+    socket.once('close', () => connections.delete(socket));
+  });
+  const cut = () => connections.forEach((socket) => socket.destroy());
+
   return {
     http,
+    cut,
     async prepare() {
       await app.prepare();
       handle = app.getRequestHandler();
     },
     async close() {
-      http.closeAllConnections();
-      await new Promise<void>((resolve) => http.close(() => resolve()));
+      const closed = new Promise<void>((resolve) => http.close(() => resolve()));
+      cut();
+      await closed;
       await app.close();
     },
   };

@@ -92,7 +92,9 @@ export async function startServer(env: Env, options: StartOptions): Promise<Runn
     port,
     async close() {
       hub.close();
-      await sockets.close();
+      const closed = sockets.close();
+      web.cut();
+      await closed;
       await web.close();
       await processes.close();
       await runtime.instruments.close();

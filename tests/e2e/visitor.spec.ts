@@ -7,6 +7,7 @@ async function fillShortForm(page: Page): Promise<void> {
   await page.getByRole('radio', { name: /Click wrench with a scale/ }).check();
   await page.getByLabel('From').fill('40');
   await page.getByLabel('To', { exact: true }).fill('200');
+  await page.getByLabel('Unit').selectOption('N.m');
   await page.getByRole('radio', { name: /Up to its maximum/ }).check();
 }
 
@@ -45,6 +46,7 @@ test('says what is wrong beside the field, and keeps what was typed', async ({ w
     await phone.getByRole('radio', { name: /Click wrench with a scale/ }).check();
     await phone.getByLabel('From').fill('200');
     await phone.getByLabel('To', { exact: true }).fill('40');
+    await phone.getByLabel('Unit').selectOption('N.m');
     await phone.getByRole('radio', { name: /Up to its maximum/ }).check();
     await phone.getByRole('button', { name: 'Join the line' }).click();
     await expect(phone.getByText(/Are they swapped\?/).first()).toBeVisible();
