@@ -140,11 +140,14 @@ interface HeardProps {
 
 /** How fresh the ticket is: live, out of reach, or a page that no script has brought to life. */
 function Heard({ room, madeAt, timeZone }: HeardProps) {
+  const lastHeard = `Last heard ${timeWords(room.heardAt ?? new Date(madeAt), timeZone)}.`;
   const words =
     room.refused ??
-    (room.connected && room.heardAt !== null
-      ? 'This page follows your tool live.'
-      : `Last heard ${timeWords(room.heardAt ?? new Date(madeAt), timeZone)}. Reload to see news.`);
+    (room.heardAt === null
+      ? `${lastHeard} Reload to see news.`
+      : room.connected
+        ? 'This page follows your tool live.'
+        : `${lastHeard} The post is out of reach; this page keeps trying.`);
   const isLost = !room.connected || room.refused !== null;
   return (
     <p
