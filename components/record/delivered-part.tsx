@@ -29,7 +29,7 @@ export function DeliveredPart({ record }: { record: SignedRecord }) {
               <th scope="row" className="py-2 text-left font-semibold">
                 {pointName(record, point)}
               </th>
-              <td className="font-reading py-2 text-right font-bold">
+              <td className="font-reading py-2 pl-3 text-right font-bold whitespace-nowrap">
                 {measuredWords(delivered.valueNm, delivered.expandedNm, plan.unit)}
               </td>
             </tr>
