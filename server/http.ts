@@ -13,13 +13,20 @@ export interface WebServer {
   close(): Promise<void>;
 }
 
+interface WebServerOptions {
+  dev: boolean;
+  dir: string;
+  /** Next fetches its own pages there after a form's redirect. */
+  port: number;
+}
+
 /**
  * Next and the live channel on one port. Next adds an `upgrade` listener to the server that it is
  * given; it gets an emitter of its own, and only what is not the live channel's.
  */
-export function createWebServer({ dev, dir }: { dev: boolean; dir: string }): WebServer {
+export function createWebServer({ dev, dir, port }: WebServerOptions): WebServer {
   const upgrades = new EventEmitter();
-  const app = next({ dev, dir, httpServer: upgrades as Server });
+  const app = next({ dev, dir, port, httpServer: upgrades as Server });
   let handle: ((req: IncomingMessage, res: ServerResponse) => Promise<void>) | null = null;
 
   const http = createServer((req, res) => {

@@ -42,7 +42,7 @@ export async function startServer(env: Env, options: StartOptions): Promise<Runn
       : { kind: 'folder', dataDir: path.join(env.dataDir, 'db') },
   );
   const secret = readSecret(env.dataDir, env.secret);
-  const web = createWebServer({ dev: options.dev, dir: ROOT });
+  const web = createWebServer({ dev: options.dev, dir: ROOT, port: env.port });
 
   const hub = createHub({
     db: store.db,

@@ -102,6 +102,8 @@ export const pullDecisions = pgTable(
       .notNull()
       .references(() => checks.id),
     decision: text('decision').$type<'accepted' | 'voided'>().notNull(),
+    /** What an accepted value is: a tester that sends by itself does not know that nothing let go. */
+    outcome: text('outcome').$type<'reading' | 'no-release'>(),
     /** What the tool said, in the plan's unit: its setting, or what its display showed. */
     toolValue: doublePrecision('tool_value'),
     fault: text('fault').$type<VoidFault>(),

@@ -25,9 +25,13 @@ export type RecordPullInput = z.input<typeof recordPullSchema>;
 
 export const acceptPullSchema = z.object({
   pullId: z.uuid(),
+  /** `no-release`: the value is how far a setting tool was pulled without letting go. */
+  outcome: z.enum(['reading', 'no-release']).default('reading'),
   toolValue: torque.nullable().default(null),
   confirmed: z.boolean().default(false),
 });
+
+export type AcceptPullInput = z.input<typeof acceptPullSchema>;
 
 export const voidPullSchema = z.object({
   pullId: z.uuid(),

@@ -14,9 +14,6 @@ interface TicketPageProps {
   params: Promise<{ token: string }>;
 }
 
-// Without a referrer at all a browser keeps the form's origin back too, and the post is refused.
-const FORM_REFERRER = 'same-origin';
-
 /** How often a page without a script asks for news. */
 const RELOAD_SECONDS = 30;
 
@@ -39,7 +36,6 @@ export async function generateMetadata({ params }: TicketPageProps): Promise<Met
   const { ticket, line } = read;
   return {
     title: ticketTitle(ticket, toolsBefore(line.waiting, ticket.code)),
-    referrer: FORM_REFERRER,
   };
 }
 

@@ -46,7 +46,7 @@ describe('pullActions', () => {
     const exercise = checkView({ step: stepView({ kind: 'exercise' }) });
     expect(actionsOf({ check: exercise }).at('r')).toBeUndefined();
     const offered = checkView({ offered: pullView({ state: 'offered' }) });
-    expect(actionsOf({ check: offered }).at('r')).toBeUndefined();
+    expect(actionsOf({ check: offered }).at('r')).toMatchObject({ label: 'did not let go' });
   });
 
   it('lets go of what is typed before Esc stops anything', () => {

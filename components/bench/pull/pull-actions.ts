@@ -22,7 +22,7 @@ interface PullActionsInput {
 /** Everything that can be done in the middle of the pulls, in the order of the key bar. */
 export function pullActions(input: PullActionsInput): BenchAction[] {
   const { check, needs, entry, busy, open } = input;
-  const isReading = check.step?.kind === 'reading' && !check.offered;
+  const isReading = (check.offered ?? check.step)?.kind === 'reading';
   const isTyped = entry.text.value !== '' || entry.text.toolValue !== '';
   const actions: (BenchAction | false)[] = [
     needs !== null && {

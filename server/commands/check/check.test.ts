@@ -334,6 +334,18 @@ describe('signing off', () => {
     });
   });
 
+  it('a value that the tester sent can be taken as how far it was pulled without letting go', async () => {
+    const checkId = await start();
+    const tester = store.contextFor({ kind: 'tester', testerId: world.tester.id });
+    const offer = (value: number) => recordPull(tester, uuidv7(), { checkId, value, unit: 'N.m' });
+    for (let index = 0; index < 5; index += 1) await offer(339);
+    const { pullId } = await offer(88);
+    const take = (outcome: 'no-release') => acceptPull(operator(), uuidv7(), { pullId, outcome });
+    await take('no-release');
+    expect((await view()).points[0]).toMatchObject({ verdict: 'outside' });
+    expect((await view()).step).toMatchObject({ targetLabel: '204' });
+  });
+
   it('without today’s proof is not judged, whatever the readings', async () => {
     await store.db.execute('truncate tester_proofs cascade');
     const checkId = await start();

@@ -4,7 +4,7 @@ import { acceptPullSchema } from '@/lib/record/pull-input';
 import { checkEntry, lockCheck } from '@/server/commands/check/shared';
 import { defineCommand } from '@/server/commands/command';
 import { Problem } from '@/server/problem';
-import { askAbout, insertDecision } from './shared';
+import { askAbout, insertDecision, refuseTooLow } from './shared';
 
 /** The operator takes a value that the tester offered; for an indicating tool with its display. */
 export const acceptPull = defineCommand({
@@ -31,12 +31,18 @@ export const acceptPull = defineCommand({
         fields: { toolValue: 'Type what the tool’s own display showed.' },
       });
     }
-    if (step.kind === 'reading') askAbout(file, step, offered.pull.rawNm!, input.confirmed);
+    if (input.outcome === 'no-release') {
+      if (!setting || step.kind !== 'reading') {
+        throw new Problem('invalid', 'Only a reading of a setting tool can end without a release.');
+      }
+      refuseTooLow(file.check.plan, step, offered.pull.rawNm!);
+    } else if (step.kind === 'reading') askAbout(file, step, offered.pull.rawNm!, input.confirmed);
     const accepted = await insertDecision(
       tx,
       offered.pull,
       {
         decision: 'accepted',
+        outcome: input.outcome,
         toolValue: setting ? step.target : input.toolValue,
         byStaffId: staffId(),
       },

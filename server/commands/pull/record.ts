@@ -1,17 +1,9 @@
 import { recordPullSchema } from '@/lib/record/pull-input';
-import type { CheckPlan, PlanStep } from '@/lib/torque/plan';
-import { convertTorque, formatTorque } from '@/lib/torque/units';
+import { convertTorque } from '@/lib/torque/units';
 import { checkEntry, lockCheck } from '@/server/commands/check/shared';
 import { defineCommand } from '@/server/commands/command';
 import { Problem } from '@/server/problem';
-import { askAbout, checkRaw, insertDecision, insertPull, stepNow } from './shared';
-
-/** A tool has not failed to let go before it was pulled past its setting. */
-function refuseTooLow(plan: CheckPlan, step: PlanStep, rawNm: number): void {
-  if (rawNm > convertTorque(step.target, plan.unit, 'N.m')) return;
-  const words = `Pull on past ${formatTorque(step.target, plan.unit)}, up to the stop, before you say that it did not let go.`;
-  throw new Problem('invalid', words, { fields: { value: words } });
-}
+import { askAbout, checkRaw, insertDecision, insertPull, refuseTooLow, stepNow } from './shared';
 
 /**
  * Takes one pull for the step that is due. A typed reading is accepted with it. One from the tester

@@ -1,7 +1,7 @@
 import { v7 as uuidv7 } from 'uuid';
 import type { Transaction } from '@/db/client';
 import { pullDecisions, pulls } from '@/db/schema';
-import type { PlanStep } from '@/lib/torque/plan';
+import type { CheckPlan, PlanStep } from '@/lib/torque/plan';
 import { progressOf } from '@/lib/torque/progress';
 import { needsConfirmation } from '@/lib/torque/faults';
 import { correctionNm } from '@/lib/torque/tester';
@@ -84,7 +84,7 @@ export async function insertDecision(
   pull: PullFile['pull'],
   decision: Pick<
     typeof pullDecisions.$inferInsert,
-    'decision' | 'toolValue' | 'fault' | 'note' | 'byStaffId'
+    'decision' | 'outcome' | 'toolValue' | 'fault' | 'note' | 'byStaffId'
   >,
   now: Date,
 ): Promise<typeof pullDecisions.$inferSelect> {
@@ -94,6 +94,7 @@ export async function insertDecision(
     checkId: pull.checkId,
     at: now,
     decision: decision.decision,
+    outcome: decision.outcome ?? null,
     toolValue: decision.toolValue ?? null,
     fault: decision.fault ?? null,
     note: decision.note ?? null,
@@ -101,4 +102,11 @@ export async function insertDecision(
   };
   await tx.insert(pullDecisions).values(row);
   return row;
+}
+
+/** A tool has not failed to let go before it was pulled past its setting. */
+export function refuseTooLow(plan: CheckPlan, step: PlanStep, rawNm: number): void {
+  if (rawNm > convertTorque(step.target, plan.unit, 'N.m')) return;
+  const words = `Pull on past ${formatTorque(step.target, plan.unit)}, up to the stop, before you say that it did not let go.`;
+  throw new Problem('invalid', words, { fields: { value: words } });
 }

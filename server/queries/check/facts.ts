@@ -10,6 +10,10 @@ const MS_A_DAY = 86_400_000;
 export const pullState = ({ accepted, voided }: PullFile): PullFact['state'] =>
   voided ? 'voided' : accepted ? 'accepted' : 'offered';
 
+/** A reading, or a pull at whose end nothing had let go: as it was taken, else as it came. */
+export const outcomeOf = ({ pull, accepted }: PullFile): PullFact['outcome'] =>
+  accepted?.outcome ?? pull.outcome;
+
 /** A stored pull as the computation takes it. */
 export const pullFact = (plan: CheckPlan, one: PullFile): PullFact => ({
   id: one.pull.id,
@@ -18,7 +22,7 @@ export const pullFact = (plan: CheckPlan, one: PullFile): PullFact => ({
   toolValue: one.accepted?.toolValue ?? plan.steps[one.pull.stepIndex]!.target,
   rawNm: one.pull.rawNm,
   correctionNm: one.pull.correctionNm,
-  outcome: one.pull.outcome,
+  outcome: outcomeOf(one),
   state: pullState(one),
   fault: one.voided?.fault ?? null,
   note: one.voided?.note ?? null,

@@ -13,7 +13,7 @@ import {
 } from '@/lib/torque/units';
 import { deviationWords, reasonWords } from '@/lib/torque/words';
 import { progressWords } from '@/server/queries/line/progress';
-import { factsOf, pullState } from './facts';
+import { factsOf, outcomeOf, pullState } from './facts';
 import type { CheckFile, PullFile } from './load';
 import { stepView } from './step-view';
 
@@ -36,7 +36,10 @@ export function corridorPoint(
     guardPercent: point.guardPercent ?? 0,
     readings: point.readings.map(({ deviation, beyond }) => ({ deviation, beyond })),
     mean: point.summary?.mean ?? null,
-    meanExpanded: point.budget?.combined.expanded ?? null,
+    // An error that is not corrected widens what is known of the mean, as on the record.
+    meanExpanded: point.budget
+      ? point.budget.combined.expanded + point.budget.uncorrectedErrorPercent
+      : null,
     words: point.summary ? deviationWords(point.summary.mean, plan.basis) : '',
     excluded: point.excluded,
     current,
@@ -55,13 +58,14 @@ function pullView(file: CheckFile, one: PullFile): PullView {
   const { plan } = file.check;
   const step = plan.steps[one.pull.stepIndex]!;
   const division = file.tool.unit === plan.unit ? file.tool.division : null;
+  const outcome = outcomeOf(one);
   const referenceNm = one.pull.rawNm === null ? null : one.pull.rawNm + one.pull.correctionNm;
   const toolValue = one.accepted?.toolValue ?? (plan.setting ? step.target : null);
   // The tester's digits, in the tool's unit: one place more than its step there.
   const testerStep = convertTorque(file.tester.resolutionNm, 'N.m', plan.unit);
   const places = 10 ** -decimalsOf(Number(testerStep.toPrecision(1)));
   const deviation =
-    step.kind === 'reading' && one.pull.outcome === 'reading' && referenceNm && toolValue
+    step.kind === 'reading' && outcome === 'reading' && referenceNm && toolValue
       ? relativeDeviation(toolValue, convertTorque(referenceNm, 'N.m', plan.unit), plan.basis)
       : null;
   return {
@@ -70,7 +74,7 @@ function pullView(file: CheckFile, one: PullFile): PullView {
     stepIndex: one.pull.stepIndex,
     kind: step.kind,
     state: pullState(one),
-    outcome: one.pull.outcome,
+    outcome,
     direction: step.direction,
     target: formatTorque(step.target, plan.unit, { division }),
     reference:

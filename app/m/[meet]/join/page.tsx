@@ -16,9 +16,6 @@ interface JoinPageProps {
   searchParams: Promise<{ ticket?: string | string[] }>;
 }
 
-// Without a referrer at all a browser keeps the form's origin back too, and the post is refused.
-const FORM_REFERRER = 'same-origin';
-
 const COMMON_KINDS = 5;
 
 const kindOptions = VISITOR_TOOL_KINDS.map(({ value, label, help }) => ({
@@ -31,7 +28,7 @@ const units = TORQUE_UNITS.map((value) => ({ value, label: unitText(value) }));
 
 export async function generateMetadata({ params }: JoinPageProps): Promise<Metadata> {
   const meet = await meetBySlug(getRuntime().store.db, (await params).meet);
-  return { title: meet ? `Join the line at ${meet.name}` : 'Not found', referrer: FORM_REFERRER };
+  return { title: meet ? `Join the line at ${meet.name}` : 'Not found' };
 }
 
 /** One short form, and the visitor is in the line. */

@@ -1,0 +1,1 @@
+ALTER TABLE "pull_decisions" ADD COLUMN "outcome" text;
