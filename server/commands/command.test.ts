@@ -5,6 +5,7 @@ import { commandRuns, ledger, tags, tools, visitors } from '@/db/schema';
 import { holdTag } from '@/server/commands/tag/hold';
 import { joinLine } from '@/server/commands/tag/join';
 import { callTag } from '@/server/commands/tag/call';
+import { staffCommands } from '@/server/commands';
 import { actorOf, fixedId, makeWorld } from '@/tests/support/factories';
 import { codeOf, PLATE } from '@/tests/support/line';
 import { testStore, type TestStore } from '@/tests/support/store';
@@ -96,6 +97,35 @@ describe('a command that is refused', () => {
       },
     });
   });
+});
+
+describe('a text that the store cannot keep', () => {
+  it.each(['Wren\u0000', 'Wren \ud83d'])('is refused in words: %j', async (name) => {
+    const input = { ...joinInput(), visitor: { name } };
+    await expect(
+      joinLine(store.contextFor({ kind: 'public' }), uuidv7(), input),
+    ).rejects.toMatchObject({ code: 'invalid', message: expect.stringContaining('character') });
+  });
+});
+
+it('that the disk did not take never says that nothing was changed, and can be sent again', async () => {
+  const ctx = lead();
+  const id = uuidv7();
+  const input = { tagId: world.tag.id, minutes: 5 };
+  const broken = { ...ctx, flush: () => Promise.reject(new Error('EIO')) };
+  await expect(holdTag(broken, id, input)).rejects.toMatchObject({
+    code: 'internal',
+    message: expect.stringContaining('disk'),
+    cause: expect.objectContaining({ message: 'EIO' }),
+  });
+  expect(await codeOf(holdTag(ctx, id, input))).toBe('done');
+});
+
+it('the commands of the wire are those of the list, and no word of the language', () => {
+  expect(staffCommands.get('tag.hold')).toBe(holdTag.fromWire);
+  for (const word of ['constructor', '__proto__', 'toString', 'valueOf']) {
+    expect(staffCommands.get(word)).toBeUndefined();
+  }
 });
 
 describe('the ledger', () => {

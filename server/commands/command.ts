@@ -1,4 +1,4 @@
-import { createHash } from 'node:crypto';
+import { createHmac } from 'node:crypto';
 import canonicalize from 'canonicalize';
 import { and, eq } from 'drizzle-orm';
 import { z } from 'zod';
@@ -55,21 +55,34 @@ export interface Command<Schema extends z.ZodType, Result> {
   readonly fromWire: (ctx: CommandContext, id: string, input: unknown) => Promise<Result>;
 }
 
-const hashOf = (input: unknown): string =>
-  createHash('sha256')
+/** Under the post's secret: a plain hash of a name or a mobile number can be found by trying. */
+const hashOf = (secret: string, input: unknown): string =>
+  createHmac('sha256', secret)
     .update(canonicalize(input) ?? 'null')
     .digest('base64url');
+
+/** PostgreSQL keeps no NUL, and half a character is no text. */
+const isUnstorable = (value: unknown): boolean =>
+  typeof value === 'string'
+    ? value.includes('\u0000') || /\p{Surrogate}/u.test(value)
+    : typeof value === 'object' && value !== null && Object.values(value).some(isUnstorable);
 
 /** The first complaint for each field, in words. */
 function parse<Schema extends z.ZodType>(schema: Schema, input: unknown): z.output<Schema> {
   const parsed = schema.safeParse(input);
-  if (parsed.success) return parsed.data;
+  if (parsed.success) {
+    if (!isUnstorable(parsed.data)) return parsed.data;
+    throw new Problem('invalid', 'A text holds a character that cannot be kept. Type it again.');
+  }
   const fields: Record<string, string> = {};
   for (const issue of parsed.error.issues) fields[issue.path.join('.') || 'form'] ??= issue.message;
   throw new Problem('invalid', Object.values(fields).join(' '), { fields });
 }
 
 const UNIQUE_VIOLATION = '23505';
+/** With several processes on a PostgreSQL server: two commands waited for each other's rows. */
+const DEADLOCK = '40P01';
+const COLLISIONS: ReadonlySet<unknown> = new Set([UNIQUE_VIOLATION, DEADLOCK]);
 const codeOf = (error: unknown): unknown =>
   error && typeof error === 'object'
     ? 'code' in error
@@ -102,7 +115,7 @@ export function defineCommand<Schema extends z.ZodType, Result>(
             );
       }
       const input = parse(spec.input, raw);
-      const inputHash = hashOf(raw);
+      const inputHash = hashOf(ctx.secret, raw);
       const [earlier] = await tx
         .select({ inputHash: commandRuns.inputHash, result: commandRuns.result })
         .from(commandRuns)
@@ -160,7 +173,15 @@ export function defineCommand<Schema extends z.ZodType, Result>(
       return outcome.result;
     });
     // A repeat waits too: the first run may have been cut off between its commit and the disk.
-    await ctx.flush?.();
+    await ctx.flush?.().catch((cause: unknown) => {
+      throw Object.assign(
+        new Problem(
+          'internal',
+          'The post’s disk does not take what is written. Stop working, and look at the server log.',
+        ),
+        { cause },
+      );
+    });
     if (events.length > 0) ctx.publish(events, revision);
     return result;
   }
@@ -171,10 +192,10 @@ export function defineCommand<Schema extends z.ZodType, Result>(
     try {
       return await attempt(ctx, id, raw);
     } catch (error) {
-      if (codeOf(error) !== UNIQUE_VIOLATION) throw error;
+      if (!COLLISIONS.has(codeOf(error))) throw error;
       // Somebody committed the same key, or took the same slot, at the same moment: look again once.
       return attempt(ctx, id, raw).catch((again: unknown) => {
-        throw codeOf(again) === UNIQUE_VIOLATION
+        throw COLLISIONS.has(codeOf(again))
           ? new Problem(
               'conflict',
               'Somebody changed the same thing at the same moment. Look again.',

@@ -77,6 +77,6 @@ const list: { commandName: string; fromWire: FromWire }[] = [
 ];
 
 /** The commands that staff screens send to `/api/commands/…`, by name. Each parses its own input. */
-export const staffCommands: Record<string, FromWire | undefined> = Object.fromEntries(
+export const staffCommands: ReadonlyMap<string, FromWire> = new Map(
   list.map(({ commandName, fromWire }) => [commandName, fromWire]),
 );

@@ -84,11 +84,11 @@ export function bindInstruments({
       });
     } catch (error) {
       const problem = toProblemDocument(error);
-      if (problem.code === 'internal') throw error;
       hub.notice(
         testerId,
         `The tester sent ${pull.raw.trim()}. It was not taken: ${problem.detail}`,
       );
+      if (problem.code === 'internal') throw error;
     }
   }
 

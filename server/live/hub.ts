@@ -125,8 +125,17 @@ export function createHub(options: HubOptions): LiveHub {
   return {
     publish(events, revision) {
       for (const event of events) {
-        one(event, revision);
-        for (const listener of listeners) listener(event);
+        // What is committed stays so, whatever becomes of its news: the caller is not told a lie.
+        for (const tell of [
+          () => one(event, revision),
+          ...listeners.map((one) => () => one(event)),
+        ]) {
+          try {
+            tell();
+          } catch (error) {
+            onError(error);
+          }
+        }
       }
       // The desk reads the most; it comes after those who wait for their turn.
       for (const event of events) {

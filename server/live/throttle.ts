@@ -7,19 +7,17 @@ export function createThrottle<Key>(
   windowMs: number,
   onError: (error: unknown) => void,
 ) {
-  const states = new Map<Key, { again: boolean; timer: NodeJS.Timeout | null; running: boolean }>();
+  const states = new Map<Key, { again: boolean; timer: NodeJS.Timeout | null }>();
   let closed = false;
 
   const start = async (key: Key): Promise<void> => {
     const state = states.get(key)!;
-    state.running = true;
     state.again = false;
     try {
       await work(key);
     } catch (error) {
       onError(error);
     }
-    state.running = false;
     if (closed) return;
     state.timer = setTimeout(() => {
       state.timer = null;
@@ -37,7 +35,7 @@ export function createThrottle<Key>(
         state.again = true;
         return;
       }
-      states.set(key, { again: false, timer: null, running: false });
+      states.set(key, { again: false, timer: null });
       void start(key);
     },
     close(): void {
