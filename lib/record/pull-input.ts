@@ -5,7 +5,8 @@ import { TORQUE_UNITS } from '@/lib/torque/units';
 
 const torque = z
   .number({ error: 'The torque must be a number.' })
-  .min(0, 'A torque is not negative.');
+  .min(0, 'A torque is not negative.')
+  .max(1_000_000, 'No tool and no tester shows such a torque.');
 
 /** One pull as it comes in: typed, or from the tester. */
 export const recordPullSchema = z.object({

@@ -1,7 +1,7 @@
 import { eq } from 'drizzle-orm';
 import { v7 as uuidv7 } from 'uuid';
 import { beforeEach, describe, expect, it } from 'vitest';
-import { checks, pullDecisions, pulls, records, tags, testerProofs } from '@/db/schema';
+import { checks, meets, pullDecisions, pulls, records, tags, testerProofs } from '@/db/schema';
 import { parseRecord } from '@/lib/record/record';
 import { acceptPull } from '@/server/commands/pull/accept';
 import { recordPull } from '@/server/commands/pull/record';
@@ -178,6 +178,55 @@ describe('pulling', () => {
     await pull(checkId, 67.4, { toolValue: 68.2 });
     // 100·(68.2 − 67.4)/67.4
     expect((await view()).points[0]!.readings[0]!.deviation).toBeCloseTo(1.18694, 5);
+  });
+
+  it('refuses what no deviation can be made of, and the check goes on', async () => {
+    await store.db
+      .update(meets)
+      .set({ planSettings: { ...world.meet.planSettings, basis: 'set' } });
+    const checkId = await start({
+      tool: { ...PLATE, toolClass: 'I-C', division: 0.1, claim: null },
+      asFound: { testerMode: 'live', temperatureC: 21 },
+    });
+    await exercise(checkId);
+    await expect(pull(checkId, 67.4, { toolValue: 0 })).rejects.toMatchObject({
+      extra: { fields: { toolValue: expect.stringContaining('shows nothing') } },
+    });
+    await expect(pull(checkId, 67.4, { toolValue: 1e300 })).rejects.toThrow('No tool');
+    await expect(pull(checkId, 1e-300, { confirmed: true, toolValue: 68 })).rejects.toThrow(
+      'above zero',
+    );
+    await pull(checkId, 67.4, { toolValue: 68.2 });
+    // Set basis: 100·(67.4 − 68.2)/68.2
+    expect((await view()).points[0]!.readings[0]!.deviation).toBeCloseTo(-1.17302, 5);
+  });
+
+  it('comes up from below again for a pull that is repeated at an earlier set point', async () => {
+    const checkId = await start();
+    await exercise(checkId);
+    const first = await pull(checkId, 67);
+    expect((await view()).step?.instruction).toContain('Leave it at 68');
+    for (let index = 1; index < 6; index += 1) {
+      const { target } = (await view()).step!;
+      await pull(checkId, target);
+    }
+    expect((await view()).step?.instruction).toContain('Leave it at 204');
+    await voidPull(operator(), uuidv7(), { pullId: first.pullId, fault: 'slipped' });
+    expect((await view()).step?.instruction).toContain('Set 68 N·m, coming up from below');
+    await pull(checkId, 67);
+    expect((await view()).step?.instruction).toContain('Set 204 N·m, coming up from below');
+    const { pullId } = await pull(checkId, 203);
+    await voidPull(operator(), uuidv7(), { pullId, fault: 'set-wrongly' });
+    expect((await view()).step?.instruction).toContain('Set 204 N·m, coming up from below');
+  });
+
+  it('never sets a preset tool', async () => {
+    await start({
+      tool: { ...PLATE, toolClass: 'II-B', nominal: 100, division: null, claim: null },
+    });
+    expect((await view()).step?.instruction).toBe(
+      'Leave it as it is set. Pull smoothly until it lets go.',
+    );
   });
 
   it('takes nothing while paused', async () => {

@@ -4,7 +4,7 @@ import { acceptPullSchema } from '@/lib/record/pull-input';
 import { checkEntry, lockCheck } from '@/server/commands/check/shared';
 import { defineCommand } from '@/server/commands/command';
 import { Problem } from '@/server/problem';
-import { askAbout, insertDecision, refuseTooLow } from './shared';
+import { askAbout, checkShown, insertDecision, refuseTooLow } from './shared';
 
 /** The operator takes a value that the tester offered; for an indicating tool with its display. */
 export const acceptPull = defineCommand({
@@ -26,11 +26,7 @@ export const acceptPull = defineCommand({
     }
     const step = file.check.plan.steps[offered.pull.stepIndex]!;
     const { setting } = file.check.plan;
-    if (!setting && step.kind === 'reading' && input.toolValue === null) {
-      throw new Problem('invalid', 'Type what the tool’s own display showed.', {
-        fields: { toolValue: 'Type what the tool’s own display showed.' },
-      });
-    }
+    checkShown(file.check.plan, step, input.toolValue);
     if (input.outcome === 'no-release') {
       if (!setting || step.kind !== 'reading') {
         throw new Problem('invalid', 'Only a reading of a setting tool can end without a release.');

@@ -3,7 +3,15 @@ import { convertTorque } from '@/lib/torque/units';
 import { checkEntry, lockCheck } from '@/server/commands/check/shared';
 import { defineCommand } from '@/server/commands/command';
 import { Problem } from '@/server/problem';
-import { askAbout, checkRaw, insertDecision, insertPull, refuseTooLow, stepNow } from './shared';
+import {
+  askAbout,
+  checkRaw,
+  checkShown,
+  insertDecision,
+  insertPull,
+  refuseTooLow,
+  stepNow,
+} from './shared';
 
 /**
  * Takes one pull for the step that is due. A typed reading is accepted with it. One from the tester
@@ -38,11 +46,7 @@ export const recordPull = defineCommand({
     const rawNm = input.value === null ? null : convertTorque(input.value, input.unit, 'N.m');
     if (rawNm !== null) checkRaw(file, rawNm);
     if (input.outcome === 'no-release') refuseTooLow(file.check.plan, step, rawNm!);
-    if (typed && reading && !setting && input.toolValue === null) {
-      throw new Problem('invalid', 'Type what the tool’s own display showed.', {
-        fields: { toolValue: 'Type what the tool’s own display showed.' },
-      });
-    }
+    if (typed) checkShown(file.check.plan, step, input.toolValue);
     if (typed && reading && input.outcome === 'reading')
       askAbout(file, step, rawNm!, input.confirmed);
 

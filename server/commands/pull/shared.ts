@@ -27,15 +27,36 @@ export function stepNow(file: CheckFile): { index: number; step: PlanStep } {
   return { index, step: file.check.plan.steps[index]! };
 }
 
+/** Below this no tester tells a torque from none, and a deviation relative to it is no number, N·m. */
+const LEAST_NM = 1e-6;
+
 /** Refuses what no tester could have measured. Nothing here looks at tolerance or target. */
 export function checkRaw(file: CheckFile, rawNm: number): void {
-  if (rawNm <= 0)
+  if (rawNm < LEAST_NM)
     throw new Problem('invalid', 'A pull needs a torque above zero.', {
       fields: { value: 'Above zero, please.' },
     });
   if (rawNm > file.tester.maxNm * 1.000001) {
     const words = `${formatTorque(rawNm, 'N.m')} is above the tester’s range, which ends at ${formatTorque(file.tester.maxNm, 'N.m')}.`;
     throw new Problem('invalid', words, { fields: { value: words } });
+  }
+}
+
+/**
+ * What an indicating tool's display showed at a reading. It may show nothing at all, except where the
+ * deviation is taken relative to it.
+ * @throws Problem `invalid` that names the field.
+ */
+export function checkShown(plan: CheckPlan, step: PlanStep, toolValue: number | null): void {
+  if (plan.setting || step.kind !== 'reading') return;
+  const refuse = (words: string): never => {
+    throw new Problem('invalid', words, { fields: { toolValue: words } });
+  };
+  if (toolValue === null) refuse('Type what the tool’s own display showed.');
+  else if (plan.basis === 'set' && convertTorque(toolValue, plan.unit, 'N.m') < LEAST_NM) {
+    refuse(
+      'A display that shows nothing gives no deviation from it: void the pull, or mark the tool unfit.',
+    );
   }
 }
 
