@@ -9,15 +9,22 @@ import { ProblemNotice } from './problem-notice';
 
 /** Nothing is at the bench, and nobody is called to it: it is paused or closed. */
 export function ShutPhase() {
-  const { bench } = useBench();
+  const { bench, me } = useBench();
   const { bench: place } = bench;
   const open = useCommand<{ benchId: string }>('bench.open');
   const leave = useCommand<{ benchId: string }>('bench.leave');
+  // What a lead has closed, a lead opens.
+  const mayOpen = place.state === 'paused' || me.role !== 'operator';
   const openIt = () => open.mutate({ benchId: place.id });
   return (
     <BenchFrame
       actions={[
-        { key: 'enter', label: 'open the bench', run: openIt, disabled: open.isPending },
+        {
+          key: 'enter',
+          label: 'open the bench',
+          run: openIt,
+          disabled: open.isPending || !mayOpen,
+        },
         {
           key: 'l',
           label: 'leave the bench',
@@ -33,9 +40,13 @@ export function ShutPhase() {
         </h2>
         {place.pausedReason && <p className="text-xl">{place.pausedReason}</p>}
         <p className="text-fore-quiet text-xl">Nobody is called here until it is open again.</p>
-        <Button size="big" className="self-start" pending={open.isPending} onClick={openIt}>
-          Open the bench
-        </Button>
+        {mayOpen ? (
+          <Button size="big" className="self-start" pending={open.isPending} onClick={openIt}>
+            Open the bench
+          </Button>
+        ) : (
+          <p className="text-xl">A lead has closed it, and can open it.</p>
+        )}
         <ProblemNotice errors={[open.error, leave.error]} />
       </div>
     </BenchFrame>

@@ -11,8 +11,11 @@ const setState = <Name extends Permission>(name: Name, state: BenchState) =>
   defineCommand({
     name,
     input: benchInput.extend({ reason: reason.nullable().default(null) }),
-    run: async ({ tx }, input) => {
+    run: async ({ tx, standing }, input) => {
       const bench = await lockBench(tx, input.benchId);
+      if (bench.state === 'closed' && standing === 'operator') {
+        throw new Problem('forbidden', `A lead has closed bench ${bench.number}, and can open it.`);
+      }
       if (state === 'closed') {
         const busy = (await tagsAtBench(tx, bench.id))[0];
         if (busy)

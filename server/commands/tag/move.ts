@@ -25,11 +25,8 @@ export const moveInLine = defineCommand({
     return {
       result: { tagId: tag.id, place: input.place },
       entry: tagEntry(tag, { toPlace: input.place, reason: input.reason }),
-      // Every phone reads its own place from the line; its ticket is read anew.
-      events: [
-        ...tagEvents(tag),
-        ...others.map((other) => ({ kind: 'tag' as const, tagId: other.id })),
-      ],
+      // Every phone finds its own place in the line.
+      events: tagEvents(tag),
     };
   },
 });

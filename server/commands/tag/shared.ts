@@ -1,7 +1,7 @@
 import { and, eq, inArray, isNotNull } from 'drizzle-orm';
 import { z } from 'zod';
 import type { Transaction } from '@/db/client';
-import { tags } from '@/db/schema';
+import { meets, tags } from '@/db/schema';
 import { moveTag, type TagMove } from '@/lib/line/machine';
 import { freePeg } from '@/lib/line/order';
 import type { LiveEvent } from '@/server/live/events';
@@ -43,6 +43,8 @@ export async function takePeg(
   meetId: string,
   wanted: number | null,
 ): Promise<number> {
+  // Two tools that are hung at once do not get one peg.
+  await tx.select({ id: meets.id }).from(meets).where(eq(meets.id, meetId)).for('update');
   const taken = (
     await tx
       .select({ peg: tags.peg })

@@ -4,6 +4,7 @@ import { headers } from 'next/headers';
 import { redirect } from 'next/navigation';
 import { v7 as uuidv7 } from 'uuid';
 import type { JoinState } from '@/components/join/fields';
+import { addressOf } from '@/server/access/address';
 import { linkToken } from '@/server/access/links';
 import { joinLine } from '@/server/commands/tag/join';
 import { problemOf } from '@/server/edge';
@@ -21,8 +22,7 @@ export async function joinFromForm(before: JoinState, form: FormData): Promise<J
     commandId: null,
     attempt: before.attempt + 1,
   };
-  const address = (await headers()).get('x-forwarded-for')?.split(',').at(-1)?.trim();
-  const waitSeconds = await countJoin(address ?? 'unknown');
+  const waitSeconds = await countJoin(addressOf(await headers()));
   if (waitSeconds !== null) {
     const message = `Many people are joining just now. Wait ${waitSeconds} seconds and send it again.`;
     return { ...refused, message };
