@@ -19,6 +19,8 @@ export const recordPullSchema = z.object({
   /** What the tool's display showed, in the plan's unit; null for setting tools. */
   toolValue: torque.nullable().default(null),
   outcome: z.enum(['reading', 'no-release']).default('reading'),
+  /** The step that the value was typed for; null to take it for the step that is due. */
+  stepIndex: z.number().int().min(0).nullable().default(null),
   /** Yes to the question about a value that looks mistyped. */
   confirmed: z.boolean().default(false),
 });

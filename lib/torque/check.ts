@@ -1,6 +1,6 @@
 import type { CheckEvaluation, PointEvaluation } from './evaluation';
 import type { CheckFacts, PullFact } from './facts';
-import type { PlanPoint } from './plan';
+import type { PlanPoint, PlanStep } from './plan';
 import { evaluatePoint } from './point';
 import { progressOf } from './progress';
 import { statementOf } from './statement';
@@ -14,6 +14,9 @@ export type * from './facts';
 /** Ambient temperature that the standard asks for, °C (ISO 6789-1). */
 export const AMBIENT_C = { min: 18, max: 28 } as const;
 
+const isSamePoint = (one: PlanPoint, other: PlanPoint): boolean =>
+  one.direction === other.direction && one.target === other.target;
+
 function temperatureWords(temperatureC: number | null): string[] {
   if (temperatureC === null) return ['The ambient temperature was not recorded.'];
   if (temperatureC >= AMBIENT_C.min && temperatureC <= AMBIENT_C.max) return [];
@@ -21,7 +24,28 @@ function temperatureWords(temperatureC: number | null): string[] {
   return [`Ambient temperature ${formatNumber(temperatureC)} °C, outside ${range}.`];
 }
 
-function notFollowedOf(facts: CheckFacts, points: readonly PointEvaluation[], missing: number) {
+/** Points that were pulled again after a later one, such as for a voided pull: not in ascending order. */
+function repeatedLater(facts: CheckFacts, pulls: readonly PullFact[]): PlanStep[] {
+  const { steps } = facts.plan;
+  const found: PlanStep[] = [];
+  let latest = -1;
+  for (const pull of pulls) {
+    const step = steps[pull.stepIndex];
+    if (step?.kind !== 'reading' || pull.state !== 'accepted') continue;
+    const after = steps[latest];
+    const isBack = after !== undefined && pull.stepIndex < latest && !isSamePoint(after, step);
+    if (isBack && !found.some((one) => isSamePoint(one, step))) found.push(step);
+    latest = Math.max(latest, pull.stepIndex);
+  }
+  return found;
+}
+
+function notFollowedOf(
+  facts: CheckFacts,
+  inSequence: readonly PullFact[],
+  points: readonly PointEvaluation[],
+  missing: number,
+) {
   const { plan, tool } = facts;
   const division = tool.unit === plan.unit ? tool.division : null;
   const reason = facts.stopReason?.trim();
@@ -37,6 +61,11 @@ function notFollowedOf(facts: CheckFacts, points: readonly PointEvaluation[], mi
           `No further readings at ${formatTorque(point.target, plan.unit, { division })} ` +
           `${directionWords(point.direction)}: the tool had not let go.`,
       ),
+    ...repeatedLater(facts, inSequence).map(
+      (step) =>
+        `${formatTorque(step.target, plan.unit, { division })} ${directionWords(step.direction)} ` +
+        'was pulled again after a later set point.',
+    ),
     ...temperatureWords(facts.temperatureC),
   ];
 }
@@ -75,9 +104,7 @@ export function evaluateCheck(facts: CheckFacts): CheckEvaluation {
 
   const belongsTo = (point: PlanPoint) => (pull: PullFact) => {
     const step = plan.steps[pull.stepIndex];
-    return (
-      step?.kind === 'reading' && step.direction === point.direction && step.target === point.target
-    );
+    return step?.kind === 'reading' && isSamePoint(step, point);
   };
   const points = plan.points.map((point) =>
     evaluatePoint({
@@ -99,7 +126,7 @@ export function evaluateCheck(facts: CheckFacts): CheckEvaluation {
     nextStepIndex,
     progress,
     missing,
-    notFollowed: notFollowedOf(facts, points, missing.length),
+    notFollowed: notFollowedOf(facts, inSequence, points, missing.length),
     delivered: deliveredOf(points),
   };
 }

@@ -32,6 +32,11 @@ describe('certificateAt', () => {
     expect(at('ccw', 150)?.errorPercent).toBeCloseTo(1.5, 12);
     expect(at('ccw', 150)?.k).toBeCloseTo(2.1, 12);
   });
+  it('gives the standard uncertainty between those of its points, whatever their coverage', () => {
+    // (1/2.2 + 0.5/2)/2 = 0.3522727
+    const { expandedPercent, k } = at('ccw', 150) ?? { expandedPercent: NaN, k: NaN };
+    expect(expandedPercent / k).toBeCloseTo(0.3522727, 7);
+  });
   it('is null outside the certified range and in a direction without points', () => {
     expect(at('cw', 49.9)).toBeNull();
     expect(at('cw', 0)).toBeNull();

@@ -46,11 +46,14 @@ export function certificateAt(options: {
   const lower = points[above - 1];
   if (!upper || !lower) return null;
   const share = (torqueNm - lower.torqueNm) / (upper.torqueNm - lower.torqueNm);
-  const between = (key: keyof CertifiedAt) => lower[key] + share * (upper[key] - lower[key]);
+  const between = (of: (point: CertificatePoint) => number) =>
+    of(lower) + share * (of(upper) - of(lower));
+  const k = between((point) => point.k);
   return {
-    errorPercent: between('errorPercent'),
-    expandedPercent: between('expandedPercent'),
-    k: between('k'),
+    errorPercent: between((point) => point.errorPercent),
+    // The standard uncertainty is what is linear, also where the coverage factors differ.
+    expandedPercent: k * between((point) => point.expandedPercent / point.k),
+    k,
   };
 }
 

@@ -44,7 +44,14 @@ export function NoReleasePanel({ check, unit, onClose }: NoReleasePanelProps) {
     if (value === null || Number.isNaN(value)) return setError('Type the highest torque reached.');
     setError(undefined);
     record.mutate(
-      { checkId: check.id, value, unit, outcome: 'no-release', confirmed: true },
+      {
+        checkId: check.id,
+        value,
+        unit,
+        outcome: 'no-release',
+        stepIndex: check.step?.index ?? null,
+        confirmed: true,
+      },
       { onSuccess: onClose },
     );
   };

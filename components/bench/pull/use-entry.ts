@@ -49,7 +49,11 @@ export function useEntry({ check, needs, unit, connected, onTaken }: EntryOption
   const last = useRef<'record' | 'accept'>('record');
 
   const error = record.error ?? accept.error;
-  const doubt = error?.problem.code === 'confirm' ? error.problem.detail : null;
+  // A question is about the value that it was asked about, and about no other that came since.
+  const asked = check.offered
+    ? accept.variables?.pullId === check.offered.id && accept.error
+    : record.error;
+  const doubt = asked && asked.problem.code === 'confirm' ? asked.problem.detail : null;
   const unanswered = isUnanswered(error);
   const isSettled = decided !== null && decided === check.offered?.id;
   const pending = record.isPending || accept.isPending || isSettled;
@@ -91,7 +95,11 @@ export function useEntry({ check, needs, unit, connected, onTaken }: EntryOption
     const confirmed = doubt !== null;
     const { value, toolValue } = read.numbers;
     if (check.offered) sendAccept({ pullId: check.offered.id, toolValue, confirmed });
-    else sendRecord({ checkId: check.id, value, unit, toolValue, confirmed });
+    else {
+      // A value that the tester sent this very moment must not push a typed one to the next step.
+      const stepIndex = needs.value ? (check.step?.index ?? null) : null;
+      sendRecord({ checkId: check.id, value, unit, toolValue, stepIndex, confirmed });
+    }
   };
 
   // What went out unanswered goes out again, under its own id, when the post is heard again.
@@ -118,6 +126,7 @@ export function useEntry({ check, needs, unit, connected, onTaken }: EntryOption
     doubt,
     pending,
     unanswered,
-    refusal: error && doubt === null && !unanswered && !hasFieldWords ? error : null,
+    refusal:
+      error && error.problem.code !== 'confirm' && !unanswered && !hasFieldWords ? error : null,
   };
 }

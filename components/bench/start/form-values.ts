@@ -2,7 +2,6 @@ import { parseDecimal, parseNumbers } from '@/lib/line/join';
 import type { BenchSnapshot } from '@/lib/live/contract';
 import type { StartCheckInput } from '@/lib/record/check-start';
 import { isFixedTool, isSettingTool, TOOL_CLASSES, type ToolClass } from '@/lib/torque/tool';
-import { formatNumber } from '@/lib/torque/units';
 
 /** What stands in the fields of the start form: numbers as typed, choices by their value. */
 export interface StartFormValues {
@@ -85,7 +84,7 @@ export function firstValues(
       temperatureC: '',
     },
     scheme: ids.consent === 'working' ? 'working' : 'standard',
-    workingPoints: (tool.workingPoints ?? []).map((point) => formatNumber(point)).join(', '),
+    workingPoints: (tool.workingPoints ?? []).join(', '),
     ownerConfirmed: false,
     cautionsSeen: false,
     testerModeConfirmed: false,

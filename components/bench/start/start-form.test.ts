@@ -17,7 +17,7 @@ const tool = {
   drive: '½ in',
   maker: null,
   serial: null,
-  workingPoints: [110.5, 200],
+  workingPoints: [112.55, 200],
 };
 const ids = {
   benchId: '01900000-0000-7000-8000-040000000001',
@@ -41,7 +41,7 @@ describe('firstValues', () => {
     const values = firstValues(tool, ids);
     expect(values.tool).toMatchObject({ toolClass: 'II-A', rangeMin: '60', division: '2' });
     expect(values.scheme).toBe('standard');
-    expect(values.workingPoints).toBe('110.5, 200');
+    expect(values.workingPoints).toBe('112.55, 200');
     expect([values.ownerConfirmed, values.cautionsSeen, values.testerModeConfirmed]).toEqual([
       false,
       false,

@@ -220,6 +220,18 @@ describe('pulling', () => {
     expect((await view()).step?.instruction).toContain('Set 204 N·m, coming up from below');
   });
 
+  it('takes a typed value for the step that it was typed for, or not at all', async () => {
+    const checkId = await start();
+    await exercise(checkId);
+    const { index } = (await view()).step!;
+    const tester = store.contextFor({ kind: 'tester', testerId: world.tester.id });
+    await recordPull(tester, uuidv7(), { checkId, value: 67.2, unit: 'N.m' });
+    const late = pull(checkId, 67.2, { stepIndex: index });
+    expect(await codeOf(late)).toBe('conflict');
+    expect((await view()).pulls.filter(({ kind }) => kind === 'reading')).toHaveLength(1);
+    await pull(checkId, 67.1, { stepIndex: index + 1 });
+  });
+
   it('never sets a preset tool', async () => {
     await start({
       tool: { ...PLATE, toolClass: 'II-B', nominal: 100, division: null, claim: null },

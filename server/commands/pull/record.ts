@@ -26,6 +26,12 @@ export const recordPull = defineCommand({
       throw new Problem('forbidden', 'This tester belongs to another bench.');
     }
     const { index, step } = stepNow(file);
+    if (input.stepIndex !== null && input.stepIndex !== index) {
+      throw new Problem(
+        'conflict',
+        'Another pull was taken here meanwhile, so this value was not. Look at what is due now.',
+      );
+    }
     const { setting } = file.check.plan;
     if (input.direction !== null && input.direction !== step.direction) {
       throw new Problem(
