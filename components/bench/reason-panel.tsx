@@ -63,6 +63,7 @@ export function ReasonPanel({
         )}
         <TextInput
           label={label}
+          hint="It is kept for good: no names, please."
           optional={optional}
           value={text}
           maxLength={maxLength}
