@@ -222,7 +222,7 @@ test('an owner whose account exists signs in by the form; a wrong password says 
   await page.getByLabel('Sign-in name').fill(OWNER.login);
   await page.getByLabel('Password').fill('not-the-password');
   await page.getByRole('button', { name: 'Sign in' }).click();
-  await expect(page.getByRole('alert').first()).toBeVisible();
+  await expect(page.getByText('do not belong together')).toBeVisible();
   await page.getByLabel('Password').fill(OWNER.password);
   await page.getByRole('button', { name: 'Sign in' }).click();
   await expect(page).toHaveURL(/\/desk/);

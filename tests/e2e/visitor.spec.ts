@@ -20,7 +20,7 @@ test('joins with the short form, and the ticket is there after a reload', async 
   await phone.getByRole('button', { name: 'Join the line' }).click();
   await expect(phone).toHaveURL(/\/t\/[\w-]{43}$/);
   await expect(code(phone)).toHaveText(/^[A-Y]\d\d$/);
-  await expect(phone.getByText(/tools? before yours/)).toBeVisible();
+  await expect(phone.getByText(/tools? before yours/).first()).toBeVisible();
   await expect(phone.getByText('follows your tool live')).toBeVisible();
   const joined = await code(phone).innerText();
   await phone.reload();
@@ -33,7 +33,7 @@ test('joins, and leaves, with no script at all', async ({ windows }) => {
   await fillShortForm(phone);
   await phone.getByRole('button', { name: 'Join the line' }).click();
   await expect(phone).toHaveURL(/\/t\/[\w-]{43}$/);
-  await expect(phone.getByText(/tools? before yours/)).toBeVisible();
+  await expect(phone.getByText(/tools? before yours/).first()).toBeVisible();
   await phone.getByText('Leave the line', { exact: true }).click();
   await phone.getByRole('button', { name: 'Yes, leave the line' }).click();
   await expect(phone.getByText('You have left the line')).toBeVisible();
