@@ -26,6 +26,9 @@ export type StoreOptions =
 /** A server writes its log before it answers; what is in memory outlasts nothing. */
 const NO_FLUSH = async (): Promise<void> => undefined;
 
+/** Any number that no other program on the database server is likely to lock. */
+const MIGRATION_LOCK = 7_085_507;
+
 const MIGRATIONS = path.join(import.meta.dirname, 'migrations');
 
 /** Opens the store and brings it to the newest schema. */
@@ -40,8 +43,18 @@ async function openPostgres(url: string): Promise<Store> {
     import('drizzle-orm/node-postgres/migrator'),
   ]);
   const pool = new pg.Pool({ connectionString: url, max: 10 });
+  // An idle connection that breaks is no fault of anybody: the next statement opens another.
+  pool.on('error', () => undefined);
   const db = drizzle({ client: pool, schema });
-  await migrate(db, { migrationsFolder: MIGRATIONS });
+  const client = await pool.connect();
+  try {
+    // Processes that start together bring the schema up one after the other.
+    await client.query('select pg_advisory_lock($1)', [MIGRATION_LOCK]);
+    await migrate(drizzle({ client, schema }), { migrationsFolder: MIGRATIONS });
+  } finally {
+    // Closed with its connection, the lock is let go also when a migration failed.
+    client.release(true);
+  }
   return { db, kind: 'postgres', flush: NO_FLUSH, close: () => pool.end() };
 }
 

@@ -14,6 +14,8 @@ export async function connectProcesses(
     import('@socket.io/postgres-adapter'),
   ]);
   const pool = new pg.Pool({ connectionString: databaseUrl, max: 2 });
+  // A connection that breaks is opened again by the adapter and by the next statement.
+  pool.on('error', () => undefined);
   await pool.query(
     `create table if not exists socket_io_attachments (
       id bigserial unique, created_at timestamptz default now(), payload bytea)`,
