@@ -4,6 +4,7 @@ import { useState, type FormEvent } from 'react';
 import type { TagView } from '@/lib/live/contract';
 import { useCommand } from '../live/use-command';
 import { Button } from '../ui/button';
+import { Kbd } from '../ui/kbd';
 import { TextInput } from '../ui/text-input';
 import { WarningShape } from '../ui/warning-shape';
 import { ProblemNotice } from './problem-notice';
@@ -45,7 +46,7 @@ export function HandBackForm({ tag, onDone }: HandBackFormProps) {
           fieldClassName="w-72"
         />
         <Button type="submit" size="big" pending={handBack.isPending} className="min-h-20">
-          Hand back
+          Hand back <Kbd>Enter</Kbd>
         </Button>
       </div>
       {isWrongTool && (

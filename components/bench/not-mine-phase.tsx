@@ -33,6 +33,9 @@ export function NotMinePhase() {
         <h2 className="font-code text-5xl font-semibold">
           {place.operator ? `${place.operator.name} works here` : 'Nobody works here'}
         </h2>
+        {!place.operator && (
+          <p className="text-xl">Take it to call tags and to run checks here, under your name.</p>
+        )}
         {busy && <ToolLine tag={busy} />}
         {check && (
           <p className="text-xl">A check is running: {check.progressWords.toLowerCase()}.</p>

@@ -3,6 +3,8 @@
 import { useRef, useState } from 'react';
 import type { CheckView, TagView } from '@/lib/live/contract';
 import { useCommand } from '../live/use-command';
+import { Button } from '../ui/button';
+import { Kbd } from '../ui/kbd';
 import { Notice } from '../ui/notice';
 import { useBench } from './bench-context';
 import { BenchFrame, TwoColumns } from './bench-frame';
@@ -35,8 +37,10 @@ export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
   const sendsItself = tester !== null && tester.kind !== 'keyed';
   const needs = entryNeeds(check, !sendsItself || typesInstead);
   const listens = sendsItself && !typesInstead && !check.offered && !check.paused;
+  const goesOn = check.paused && !check.offered;
+  const onPause = () => pause.mutate({ checkId: check.id });
   const focusField = () => field.current?.focus();
-  const entry = useEntry({ check, needs, unit, connected, onTaken: focusField });
+  const entry = useEntry({ check, needs, unit, connected, onEmpty: focusField });
   const step = check.offeredStep ?? check.step;
 
   const message =
@@ -63,7 +67,7 @@ export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
     typesInstead,
     busy: pause.isPending || simulate.isPending,
     open: setPanel,
-    onPause: () => pause.mutate({ checkId: check.id }),
+    onPause,
     onSimulate: () => simulate.mutate(),
     onTypeInstead: () => setTypesInstead(!typesInstead),
   });
@@ -89,7 +93,12 @@ export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
                 onSimulate={() => simulate.mutate()}
               />
             )}
-            {needs && (
+            {goesOn && (
+              <Button size="big" wide pending={pause.isPending} onClick={onPause}>
+                Go on <Kbd>P</Kbd>
+              </Button>
+            )}
+            {needs && !goesOn && (
               <ReadingEntry
                 check={check}
                 needs={needs}

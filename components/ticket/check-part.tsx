@@ -24,12 +24,11 @@ export function CheckPart({ check }: { check: RunningCheck }) {
           {newest.map(({ number, label, reference, words }) => (
             <li
               key={number}
-              className="border-line flex flex-wrap items-baseline justify-between gap-x-4 border-t py-1.5"
+              className="border-line grid grid-cols-[1fr_auto] items-baseline gap-x-4 border-t py-1.5"
             >
-              <span>
-                {label}: <span className="font-reading font-bold">{reference}</span>
-              </span>
-              <span className="text-fore-quiet">{words}</span>
+              <span className="text-fore-quiet">at {label}</span>{' '}
+              <span className="font-reading font-bold">{reference}</span>{' '}
+              <span className="text-fore-quiet col-span-2 text-right">{words}</span>
             </li>
           ))}
         </ol>

@@ -13,8 +13,10 @@ export const asFoundSchema = z.object({
     .nullable()
     .default(null),
   damage: words('The damage', 500).default(''),
-  battery: z.enum(['good', 'low', 'none', 'not-fitted']).default('not-fitted'),
-  zeroShown: z.boolean().nullable().default(null),
+  battery: z
+    .enum(['good', 'low', 'none', 'not-fitted'], { error: 'Look at the battery.' })
+    .default('not-fitted'),
+  zeroShown: z.boolean({ error: 'Does it show zero without load?' }).nullable().default(null),
   scale: words('The scale', 60).default(''),
   head: words('The head', 60).default(''),
   testerMode: z.enum(['first-peak', 'live'], { error: 'Confirm the tester’s own mode.' }),

@@ -21,7 +21,13 @@ export async function printedLinks(
   meetId: string,
 ): Promise<PrintedLinks> {
   const ticketRows = await db
-    .select({ id: tags.id, code: tags.code, state: tags.state, version: tags.linkVersion })
+    .select({
+      id: tags.id,
+      code: tags.code,
+      state: tags.state,
+      version: tags.linkVersion,
+      heldUntil: tags.heldUntil,
+    })
     .from(tags)
     .where(and(eq(tags.meetId, meetId), inArray(tags.state, TICKET_STATES)))
     .orderBy(asc(tags.position));
@@ -37,7 +43,11 @@ export async function printedLinks(
     .orderBy(desc(records.signedAt))
     .limit(NEWEST);
   return {
-    tickets: firstOfEach(ticketRows, ({ state }) => state)
+    tickets: firstOfEach(
+      // A held turn says so on its ticket: one that moves up is the better example.
+      [...ticketRows].sort((one, other) => Number(!!one.heldUntil) - Number(!!other.heldUntil)),
+      ({ state }) => state,
+    )
       .sort((one, other) => TICKET_STATES.indexOf(one.state) - TICKET_STATES.indexOf(other.state))
       .map(({ id, code, state, version }) => ({
         code,

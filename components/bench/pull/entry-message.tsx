@@ -12,15 +12,11 @@ const ERROR_TITLES = { value: 'Tester', toolValue: 'Tool’s display' };
 
 /**
  * What is to be settled about the value in hand, in the place of the instruction; null when nothing
- * is. The keys that settle it stand in the key bar too.
+ * is. The buttons and keys that settle it stand below.
  */
 export function entryMessage(entry: Pick<Entry, 'doubt' | 'unanswered' | 'refusal' | 'errors'>) {
   if (entry.doubt !== null) {
-    return (
-      <Notice kind="problem" title={entry.doubt}>
-        <Kbd>Enter</Kbd> again to take it, <Kbd>Esc</Kbd> to retype.
-      </Notice>
-    );
+    return <Notice kind="problem" title={entry.doubt} />;
   }
   if (entry.unanswered) {
     return (

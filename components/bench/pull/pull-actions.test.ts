@@ -73,6 +73,14 @@ describe('pullActions', () => {
     expect(actionsOf({ sendsItself: true }).keys).not.toContain('s');
   });
 
+  it('goes on with Enter while paused, and plays no pull while one waits', () => {
+    const paused = actionsOf({ check: checkView({ paused: true }) });
+    expect(paused.keys.filter((key) => key === 'enter')).toHaveLength(1);
+    expect(paused.at('enter')?.label).toBe('go on');
+    const check = checkView({ offered: pullView({ state: 'offered' }) });
+    expect(actionsOf({ check, sendsItself: true, isSimulated: true }).at('s')?.disabled).toBe(true);
+  });
+
   it('has nothing to void when every pull is void', () => {
     const check = checkView({ pulls: [pullView({ state: 'voided' })] });
     expect(actionsOf({ check }).at('v')?.disabled).toBe(true);

@@ -24,13 +24,17 @@ export function pullActions(input: PullActionsInput): BenchAction[] {
   const { check, needs, entry, busy, open } = input;
   const isReading = (check.offered ?? check.step)?.kind === 'reading';
   const isTyped = entry.text.value !== '' || entry.text.toolValue !== '';
+  // Nothing is taken while it is paused: Enter goes on.
+  const goesOn = check.paused && !check.offered;
   const actions: (BenchAction | false)[] = [
-    needs !== null && {
-      key: 'enter',
-      label: entry.doubt !== null ? 'take it all the same' : needs.verb,
-      run: entry.submit,
-      disabled: entry.pending,
-    },
+    goesOn && { key: 'enter', label: 'go on', run: input.onPause, disabled: busy },
+    needs !== null &&
+      !goesOn && {
+        key: 'enter',
+        label: entry.doubt !== null ? 'take it all the same' : needs.verb,
+        run: entry.submit,
+        disabled: entry.pending,
+      },
     {
       key: 'v',
       label: check.offered ? 'void' : 'void last',
@@ -48,7 +52,7 @@ export function pullActions(input: PullActionsInput): BenchAction[] {
       key: 's',
       label: 'simulate',
       run: input.onSimulate,
-      disabled: busy || check.paused,
+      disabled: busy || check.paused || check.offered !== null,
     },
     input.sendsItself && {
       key: 't',

@@ -35,12 +35,12 @@ interface EntryOptions {
   needs: EntryNeeds | null;
   unit: TorqueUnit;
   connected: boolean;
-  /** A pull was taken, and the fields are empty again. */
-  onTaken: () => void;
+  /** The fields are empty again: the pull was taken, or its values are to be typed anew. */
+  onEmpty: () => void;
 }
 
 /** The values of the pull in hand, from typing to the answer of the post. */
-export function useEntry({ check, needs, unit, connected, onTaken }: EntryOptions): Entry {
+export function useEntry({ check, needs, unit, connected, onEmpty }: EntryOptions): Entry {
   const [text, setText] = useState(EMPTY);
   const [errors, setErrors] = useState<EntryErrors>({});
   const [decided, setDecided] = useState<string | null>(null);
@@ -66,7 +66,7 @@ export function useEntry({ check, needs, unit, connected, onTaken }: EntryOption
   const taken = () => {
     setText(EMPTY);
     forget();
-    onTaken();
+    onEmpty();
   };
   const sendRecord = (input: RecordPullInput) => {
     last.current = 'record';
@@ -121,6 +121,7 @@ export function useEntry({ check, needs, unit, connected, onTaken }: EntryOption
     retype: () => {
       setText(EMPTY);
       forget();
+      onEmpty();
     },
     errors: { ...fields, ...errors },
     doubt,

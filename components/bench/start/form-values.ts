@@ -49,11 +49,15 @@ export function testerModeOf(value: string): 'first-peak' | 'live' | null {
 const text = (value: number | null | undefined): string =>
   value === null || value === undefined ? '' : String(value);
 
+const ELECTRONIC: readonly ToolClass[] = ['I-C', 'I-E'];
+
 /** The form as it opens: what the visitor said, for the plate to correct. */
 export function firstValues(
   tool: NonNullable<BenchSnapshot['tool']>,
   ids: { benchId: string; tagId: string; consent: 'maximum' | 'working' },
 ): StartFormValues {
+  const isElectronic = ELECTRONIC.includes(tool.toolClass);
+  const indicates = !isSettingTool(tool.toolClass);
   return {
     benchId: ids.benchId,
     tagId: ids.tagId,
@@ -77,8 +81,9 @@ export function firstValues(
     asFound: {
       settingFound: '',
       damage: '',
-      battery: 'not-fitted',
-      zeroShown: '',
+      // Looked at and said, never taken as given, where the tool has one.
+      battery: isElectronic || tool.classUnsure ? '' : 'not-fitted',
+      zeroShown: indicates || tool.classUnsure ? '' : 'no-zero',
       scale: '',
       head: '',
       temperatureC: '',
@@ -91,7 +96,7 @@ export function firstValues(
   };
 }
 
-const ZERO_SHOWN: Record<string, boolean> = { yes: true, no: false };
+const ZERO_SHOWN: Record<string, boolean | null> = { yes: true, no: false, 'no-zero': null };
 
 /**
  * The fields as the command takes them. What cannot be read becomes NaN, and the command's own
@@ -129,7 +134,8 @@ export function toStartInput(
       settingFound: parseDecimal(asFound.settingFound),
       damage: asFound.damage,
       battery: asFound.battery,
-      zeroShown: ZERO_SHOWN[asFound.zeroShown] ?? null,
+      // What was not chosen stays missing, so that the schema asks for it.
+      zeroShown: asFound.zeroShown in ZERO_SHOWN ? ZERO_SHOWN[asFound.zeroShown] : '',
       scale: asFound.scale,
       head: asFound.head,
       testerMode: testerModeOf(tool.toolClass),

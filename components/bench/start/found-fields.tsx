@@ -8,13 +8,15 @@ import { fieldWords } from './field-words';
 import type { StartFormApi } from './start-schema';
 
 const BATTERY = [
+  { value: '', label: 'Look and choose', disabled: true },
   { value: 'not-fitted', label: 'Has none' },
   { value: 'good', label: 'Good' },
   { value: 'low', label: 'Low' },
   { value: 'none', label: 'Missing or empty' },
 ];
 const ZERO = [
-  { value: '', label: 'Has no zero' },
+  { value: '', label: 'Look and choose', disabled: true },
+  { value: 'no-zero', label: 'Has no zero' },
   { value: 'yes', label: 'Shows zero' },
   { value: 'no', label: 'Does not' },
 ];

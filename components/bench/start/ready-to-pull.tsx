@@ -69,6 +69,7 @@ export function ReadyToPull(props: ReadyToPullProps) {
         <Cautions
           toolMaximum={plate && { value: plate.rangeMax, unit: plate.unit }}
           tester={bench.tester}
+          mode={mode}
         />
         <Checkbox
           {...register('cautionsSeen')}

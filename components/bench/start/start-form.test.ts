@@ -53,6 +53,23 @@ describe('firstValues', () => {
     expect(firstValues({ ...tool, classUnsure: true }, ids).tool.toolClass).toBe('');
   });
 
+  it('leaves battery and zero to be looked at where the tool has them', () => {
+    const found = (values: Partial<Parameters<typeof firstValues>[0]>) =>
+      firstValues({ ...tool, ...values }, ids).asFound;
+    expect(found({})).toMatchObject({ battery: 'not-fitted', zeroShown: 'no-zero' });
+    expect(found({ toolClass: 'I-B' })).toMatchObject({ battery: 'not-fitted', zeroShown: '' });
+    expect(found({ toolClass: 'I-C' })).toMatchObject({ battery: '', zeroShown: '' });
+    expect(found({ classUnsure: true })).toMatchObject({ battery: '', zeroShown: '' });
+    const unseen = filled((values) => {
+      values.asFound.battery = '';
+      values.asFound.zeroShown = '';
+    });
+    expect(complaints(unseen)).toEqual([
+      ['asFound.battery', 'Look at the battery.'],
+      ['asFound.zeroShown', 'Does it show zero without load?'],
+    ]);
+  });
+
   it('takes working points only when the visitor agreed to no more', () => {
     expect(firstValues(tool, { ...ids, consent: 'working' }).scheme).toBe('working');
   });
