@@ -32,15 +32,16 @@ export async function tagsOfMeet(staff: APIRequestContext, post: RunningPost): P
 }
 
 /**
- * The address of the ticket of the first tag in a state.
- * @throws Error when the meet has no tag in it.
+ * The address of the ticket of the first tag in a state, and for which `suits` holds.
+ * @throws Error when the meet has no such tag.
  */
 export async function ticketIn(
   state: TagState,
   staff: APIRequestContext,
   post: RunningPost,
+  suits: (tag: FoundTag) => boolean = () => true,
 ): Promise<string> {
-  const tag = (await tagsOfMeet(staff, post)).find((one) => one.state === state);
+  const tag = (await tagsOfMeet(staff, post)).find((one) => one.state === state && suits(one));
   if (!tag) throw new Error(`The rehearsal has no tag that is '${state}'.`);
   return `/t/${linkToken(post.secret(), 'ticket', tag.id, 1)}`;
 }

@@ -19,6 +19,12 @@ export interface RunningPost {
   restart(): Promise<void>;
 }
 
+interface PostOptions {
+  flags?: string[];
+  /** What its QR codes carry, where that is not its own address. */
+  origin?: string;
+}
+
 interface Started {
   child: ChildProcess;
   port: number;
@@ -27,7 +33,11 @@ interface Started {
 
 const START_MS = 60_000;
 
-function start(dataDir: string, port: number, flags: string[]): Promise<Started> {
+function start(
+  dataDir: string,
+  port: number,
+  { flags = [], origin }: PostOptions,
+): Promise<Started> {
   const child = spawn(process.execPath, ['--import', 'tsx', 'server/index.ts', ...flags], {
     cwd: ROOT,
     env: {
@@ -35,7 +45,7 @@ function start(dataDir: string, port: number, flags: string[]): Promise<Started>
       PULLPOST_DATA: dataDir,
       PORT: String(port),
       HOST: '127.0.0.1',
-      PULLPOST_ORIGIN: port === 0 ? '' : `http://127.0.0.1:${port}`,
+      PULLPOST_ORIGIN: origin ?? (port === 0 ? '' : `http://127.0.0.1:${port}`),
       LOG_LEVEL: 'info',
       NODE_OPTIONS: '',
     },
@@ -47,13 +57,17 @@ function start(dataDir: string, port: number, flags: string[]): Promise<Started>
       child.kill('SIGKILL');
       reject(new Error(`The server did not open within ${START_MS / 1000} s:\n${log}`));
     }, START_MS);
-    child.once('exit', (code) => reject(new Error(`The server ended with ${code}:\n${log}`)));
+    const ended = (code: number | null) =>
+      reject(new Error(`The server ended with ${code}:\n${log}`));
+    child.once('exit', ended);
     const read = (chunk: Buffer) => {
       log += chunk.toString('utf8');
       const open = /"port":(\d+)[^\n]*Pullpost is open/.exec(log);
       if (!open) return;
       clearTimeout(timer);
-      child.removeAllListeners('exit');
+      child.off('exit', ended);
+      // What it still says is let flow, so that it never waits for a reader.
+      for (const stream of [child.stdout!, child.stderr!]) stream.off('data', read).resume();
       const code = /set-up code is ([A-Z0-9]{4}-[A-Z0-9]{4})/.exec(log);
       resolve({ child, port: Number(open[1]), setupCode: code?.[1] ?? null });
     };
@@ -62,10 +76,9 @@ function start(dataDir: string, port: number, flags: string[]): Promise<Started>
   });
 }
 
-export async function startPost(options: { flags?: string[] } = {}): Promise<RunningPost> {
-  const flags = options.flags ?? [];
+export async function startPost(options: PostOptions = {}): Promise<RunningPost> {
   const dataDir = mkdtempSync(path.join(os.tmpdir(), 'pullpost-e2e-'));
-  let running = await start(dataDir, 0, flags);
+  let running = await start(dataDir, 0, options);
   const { port, setupCode } = running;
   return {
     origin: `http://127.0.0.1:${port}`,
@@ -79,7 +92,7 @@ export async function startPost(options: { flags?: string[] } = {}): Promise<Run
       await gone;
     },
     async restart() {
-      running = await start(dataDir, port, flags);
+      running = await start(dataDir, port, options);
     },
   };
 }
