@@ -44,7 +44,9 @@ function MeetTag({ meet }: { meet: PublicMeet }) {
         <p className="text-fore-quiet">On now</p>
         <h2 className="font-code text-4xl leading-none font-bold">{meet.name}</h2>
         <p className="text-fore-quiet mt-2">
-          {meet.place} · {meet.days}
+          {meet.place}
+          <br />
+          {meet.days}
         </p>
         <div className="mt-6 flex flex-col gap-3">
           {meet.joinOpen ? (

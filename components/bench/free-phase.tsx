@@ -71,7 +71,7 @@ export function FreePhase() {
                   wide
                   pending={call.isPending}
                   onClick={callNext}
-                  className="font-code min-h-28 text-5xl!"
+                  className="font-code min-h-28 text-5xl! text-balance"
                 >
                   {takeWords(first)}
                 </Button>

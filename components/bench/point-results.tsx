@@ -41,7 +41,9 @@ export function PointResults({ check }: { check: CheckView }) {
                   </span>
                 ))}
               </Cell>
-              <Cell>{point.delivered ?? point.words}</Cell>
+              <Cell className={point.delivered ? 'whitespace-nowrap' : ''}>
+                {point.delivered ?? point.words}
+              </Cell>
             </Row>
           ))}
         </tbody>
