@@ -5,7 +5,7 @@ import { certificates, ledger, testers } from '@/db/schema';
 import { certificateSchema } from '@/lib/desk/certificate';
 import { outsideRangeFault, pointsInNm } from '@/lib/desk/certificate-points';
 import { defineCommand } from '@/server/commands/command';
-import { lockTesterRow, testerEvents } from '@/server/commands/tester/shared';
+import { isChecking, lockTesterRow, testerEvents } from '@/server/commands/tester/shared';
 import { Problem } from '@/server/problem';
 
 const isoDay = (instant: Date): string => instant.toISOString().slice(0, 10);
@@ -41,7 +41,11 @@ export const addCertificate = defineCommand({
     await tx.insert(certificates).values({ id: certificateId, ...input, points, createdAt: now });
 
     const since = tester.lockedReason === null ? null : await lockedOn(tx, tester.id);
-    const lockLifted = since !== null && input.issuedOn >= since && input.dueOn >= isoDay(now);
+    const lockLifted =
+      since !== null &&
+      input.issuedOn >= since &&
+      input.dueOn >= isoDay(now) &&
+      !(await isChecking(tx, tester.id));
     if (lockLifted)
       await tx.update(testers).set({ lockedReason: null }).where(eq(testers.id, tester.id));
     return {

@@ -4,7 +4,7 @@ import { testerProofs, testers } from '@/db/schema';
 import { errorWords, failedProofWords, proofOutcome, proofSchema } from '@/lib/desk/proof';
 import { convertTorque, formatTorque } from '@/lib/torque/units';
 import { defineCommand } from '@/server/commands/command';
-import { lockTesterRow, testerEvents } from '@/server/commands/tester/shared';
+import { isChecking, lockTesterRow, testerEvents } from '@/server/commands/tester/shared';
 import { Problem } from '@/server/problem';
 
 /**
@@ -31,8 +31,15 @@ export const addProof = defineCommand({
         { question: 'far-off' },
       );
     }
-    const proofId = uuidv7();
     const { result } = outcome;
+    // What was read between a failed proof and the next rests on a tester that was wrong.
+    if (result === 'passed' && tester.lockedReason !== null && (await isChecking(tx, tester.id))) {
+      throw new Problem(
+        'wrong-move',
+        `A check from before the lock still runs on ${tester.name}. Sign it off as not judged, or give it up; then the proof can be entered.`,
+      );
+    }
+    const proofId = uuidv7();
     await tx.insert(testerProofs).values({
       id: proofId,
       testerId: tester.id,

@@ -5,6 +5,8 @@ import { actorOf, fixedId, makeTester, makeWorld } from '@/tests/support/factori
 import { checkOnBench } from '@/tests/support/line';
 import { TEST_NOW, testStore } from '@/tests/support/store';
 import { addCertificate } from '../certificate/add';
+import { signOff } from '../check/sign-off';
+import { stopEarly } from '../check/stop-early';
 import { addProof } from '../proof/add';
 import { addTester } from './add';
 import { changeTester } from './change';
@@ -112,6 +114,15 @@ describe('testers', async () => {
       code: 'invalid',
       extra: { fields: { [field]: expect.any(String) } },
     });
+  });
+
+  it('stays locked for the check that ran when its proof failed', async () => {
+    const checkId = await checkOnBench(asLead(), world.bench.id, world.tag.id);
+    await addProof(asLead(), call(1), { ...proof, reading: 103 });
+    await expect(addProof(asLead(), call(2), proof)).rejects.toMatchObject({ code: 'wrong-move' });
+    await stopEarly(asLead(), call(3), { checkId, reason: 'The tester needs a look' });
+    expect(await signOff(asLead(), call(4), { checkId })).toMatchObject({ verdict: 'not-judged' });
+    expect(await addProof(asLead(), call(5), proof)).toMatchObject({ lockLifted: true });
   });
 
   it('keeps its numbers while a check runs on it, and lets its name and plate change', async () => {
