@@ -58,6 +58,7 @@ afterEach(async () => {
   for (const client of clients) client.disconnect();
   hub.close();
   await sockets.close();
+  await new Promise((resolve) => http.close(resolve));
 });
 
 const as = (person: { id: string; sessionVersion: number }) => ({
@@ -191,6 +192,15 @@ describe('the staff’s rooms', () => {
     hub.publish([{ kind: 'staff', staffId: world.staff.operator.id }], 1);
     await gone;
   });
+});
+
+it('reads no snapshots for a connection that asks without end', async () => {
+  const stranger = await client();
+  const room = { room: 'line', meetId: world.meet.id } as const;
+  const answers = await Promise.all(Array.from({ length: 40 }, () => enter(stranger, room)));
+  expect(answers.filter(({ ok }) => ok)).toHaveLength(30);
+  expect(answers.at(-1)).toMatchObject({ code: 'too-many' });
+  expect(await enter(await client(), room)).toEqual({ ok: true });
 });
 
 it('a board that reconnects is given the newest line', async () => {

@@ -38,6 +38,10 @@ interface SocketOptions {
 /** How often every screen is told that the post is there; the board shows a loss within 5 s. */
 const HEARD_EVERY_MS = 2000;
 
+/** Each entry reads a snapshot: far above what a phone asks for that wakes again and again. */
+const MOST_ENTRIES = 30;
+const ENTRIES_WINDOW_MS = 10_000;
+
 const cookieValue = (header: string | undefined, name: string): string | undefined =>
   header
     ?.split(';')
@@ -135,8 +139,18 @@ export function createSocketServer(options: SocketOptions): {
       }
     };
 
+    let entries = { sinceMs: 0, count: 0 };
+    const isFlood = (): boolean => {
+      const nowMs = clock().getTime();
+      if (nowMs - entries.sinceMs > ENTRIES_WINDOW_MS) entries = { sinceMs: nowMs, count: 0 };
+      entries.count += 1;
+      return entries.count > MOST_ENTRIES;
+    };
+
     socket.on('room:join', (raw, ack) => {
       const answer = typeof ack === 'function' ? ack : () => undefined;
+      if (isFlood())
+        return answer({ ok: false, code: 'too-many', detail: 'Asked too often. Reload the page.' });
       const parsed = joinRoomInput.safeParse(raw);
       if (!parsed.success) return answer({ ok: false, code: 'invalid', detail: 'Unknown room.' });
       enter(parsed.data).then(
@@ -155,9 +169,12 @@ export function createSocketServer(options: SocketOptions): {
   heard.unref();
   return {
     io,
+    // The HTTP server is its owner's to close; `io.close` would wait for it and for every sleeping phone.
     async close() {
       clearInterval(heard);
-      await io.close();
+      io.disconnectSockets(true);
+      io.engine.close();
+      await io.of('/').adapter.close();
     },
   };
 }
