@@ -7,7 +7,6 @@ export const ticketFixture = (change: Partial<TicketSnapshot> = {}): TicketSnaps
   code: 'A31',
   state: 'waiting',
   place: 'visitor',
-  placeInLine: 1,
   held: false,
   benchNumber: null,
   peg: null,

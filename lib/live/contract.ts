@@ -216,8 +216,6 @@ export interface TicketSnapshot extends Snapshot {
   code: string;
   state: TagState;
   place: TagPlace;
-  /** 1 is next; null when not waiting. */
-  placeInLine: number | null;
   held: boolean;
   benchNumber: number | null;
   peg: number | null;

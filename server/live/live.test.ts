@@ -147,7 +147,7 @@ describe('the ticket room', () => {
     expect(await enter(phone, { room: 'ticket', token: ticketOf(world.tag) })).toEqual({
       ok: true,
     });
-    expect(await first).toMatchObject({ code: 'A01', state: 'waiting', placeInLine: 1 });
+    expect(await first).toMatchObject({ code: 'A01', state: 'waiting' });
 
     const checkId = await checkOnBench(as(world.staff.operator), world.bench.id, world.tag.id);
     for (let index = 0; index < 5; index += 1) {

@@ -1,7 +1,6 @@
 import { and, desc, eq } from 'drizzle-orm';
 import type { Reader } from '@/db/client';
 import { benches, checks, records, tags } from '@/db/schema';
-import { waitingOrder } from '@/lib/line/order';
 import type { CheckView, TicketSnapshot } from '@/lib/live/contract';
 import { parseRecord } from '@/lib/record/record';
 import { linkToken } from '@/server/access/links';
@@ -35,7 +34,6 @@ export const ticketOfFile = (
   code: file.tag.code,
   state: 'on_bench',
   place: 'bench',
-  placeInLine: null,
   held: false,
   benchNumber: file.benchNumber,
   peg: null,
@@ -81,7 +79,6 @@ export async function ticketSnapshot(
     code: tag.code,
     state: tag.state,
     place: tag.place,
-    placeInLine: tag.state === 'waiting' ? await placeInLine(reader, tag) : null,
     held: tag.heldUntil !== null && tag.heldUntil > now,
     benchNumber: row.benchNumber,
     peg: tag.peg,
@@ -95,12 +92,4 @@ export async function ticketSnapshot(
         }
       : null,
   };
-}
-
-async function placeInLine(reader: Reader, tag: typeof tags.$inferSelect): Promise<number> {
-  const waiting = await reader
-    .select()
-    .from(tags)
-    .where(and(eq(tags.meetId, tag.meetId), eq(tags.state, 'waiting')));
-  return waitingOrder(waiting).findIndex(({ id }) => id === tag.id) + 1;
 }
