@@ -8,8 +8,7 @@ export interface WebServer {
   http: Server;
   /** Builds or loads the application; after this, requests are answered. */
   prepare(): Promise<void>;
-  /** Ends every connection, also those of sleeping phones that would keep a closing server open. */
-  cut(): void;
+  /** Takes no more, and ends every connection, also those of sleeping phones. */
   close(): Promise<void>;
 }
 
@@ -45,18 +44,16 @@ export function createWebServer({ dev, dir, port }: WebServerOptions): WebServer
     connections.add(socket);
     socket.once('close', () => connections.delete(socket));
   });
-  const cut = () => connections.forEach((socket) => socket.destroy());
 
   return {
     http,
-    cut,
     async prepare() {
       await app.prepare();
       handle = app.getRequestHandler();
     },
     async close() {
       const closed = new Promise<void>((resolve) => http.close(() => resolve()));
-      cut();
+      for (const socket of connections) socket.destroy();
       await closed;
       await app.close();
     },

@@ -92,9 +92,7 @@ export async function startServer(env: Env, options: StartOptions): Promise<Runn
     port,
     async close() {
       hub.close();
-      const closed = sockets.close();
-      web.cut();
-      await closed;
+      await sockets.close();
       await web.close();
       await processes.close();
       await runtime.instruments.close();
