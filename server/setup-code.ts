@@ -1,5 +1,4 @@
 import { randomInt } from 'node:crypto';
-import type { Logger } from 'pino';
 import type { Reader } from '@/db/client';
 import { isSetUp } from '@/server/queries/staff/any';
 
@@ -7,17 +6,17 @@ import { isSetUp } from '@/server/queries/staff/any';
 const ALPHABET = 'ABCDEFGHJKLMNPRTUVWXY346789';
 
 /**
- * A new one-time code while the post has nobody to sign in, printed in the log; else null. Whoever
- * reads the log of the machine may set the post up.
+ * A new one-time code while the post has nobody to sign in; else null. It is printed in the log
+ * alone: whoever reads the log of the machine may set the post up.
  */
-export async function setupCodeFor(db: Reader, logger: Logger): Promise<string | null> {
+export async function setupCodeFor(db: Reader): Promise<string | null> {
   if (await isSetUp(db)) return null;
   const letters = Array.from({ length: 8 }, () => ALPHABET.charAt(randomInt(ALPHABET.length))).join(
     '',
   );
-  const code = `${letters.slice(0, 4)}-${letters.slice(4)}`;
-  logger.warn(
-    `This post has no owner yet. Open it in a browser; the one-time set-up code is ${code}`,
-  );
-  return code;
+  return `${letters.slice(0, 4)}-${letters.slice(4)}`;
 }
+
+/** What the log says to whoever started a post that has no owner. */
+export const setupWords = (code: string, origin: string): string =>
+  `This post has no owner yet. Open ${origin} in a browser; the one-time set-up code is ${code}`;

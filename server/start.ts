@@ -11,7 +11,7 @@ import { createSocketServer } from './live/socket';
 import { createLogger } from './logger';
 import { setRuntime, type Runtime } from './runtime';
 import { readSecret } from './secret';
-import { setupCodeFor } from './setup-code';
+import { setupCodeFor, setupWords } from './setup-code';
 
 export interface RunningServer {
   runtime: Runtime;
@@ -76,7 +76,7 @@ export async function startServer(env: Env, options: StartOptions): Promise<Runn
   hub.attach(sockets.io);
 
   await options.prepare?.(runtime);
-  runtime.setupCode = await setupCodeFor(store.db, logger);
+  runtime.setupCode = await setupCodeFor(store.db);
   await runtime.instruments.follow();
   await web.prepare();
   await new Promise<void>((resolve, reject) => {
@@ -85,6 +85,7 @@ export async function startServer(env: Env, options: StartOptions): Promise<Runn
   });
   const { port } = web.http.address() as AddressInfo;
   if (!env.origin) runtime.origin = lanOrigin(port);
+  if (runtime.setupCode) logger.warn(setupWords(runtime.setupCode, runtime.origin));
   logger.info({ port, origin: runtime.origin, store: store.kind }, 'Pullpost is open');
 
   return {

@@ -95,7 +95,7 @@ export function PullPhase({ check, tag }: { check: CheckView; tag: TagView }) {
             )}
             {goesOn && (
               <Button size="big" wide pending={pause.isPending} onClick={onPause}>
-                Go on <Kbd>P</Kbd>
+                Go on <Kbd>Enter</Kbd>
               </Button>
             )}
             {needs && !goesOn && (

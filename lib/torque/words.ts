@@ -52,7 +52,7 @@ const TOOL_KIND_WORDS: Record<ToolClass, string> = {
 export const toolKindWords = (toolClass: ToolClass): string => TOOL_KIND_WORDS[toolClass];
 
 const REASON_WORDS: Record<string, string> = {
-  'tester-out-of-date': 'the tester’s certificate is out of date',
+  'tester-out-of-date': 'the tester has no certificate that is valid today',
   'tester-locked': 'the tester is locked',
   'not-proved-today': 'the tester was not proved today',
   'not-bracketed': 'the tester was not proved again after the check',

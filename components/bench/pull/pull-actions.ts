@@ -27,7 +27,7 @@ export function pullActions(input: PullActionsInput): BenchAction[] {
   // Nothing is taken while it is paused: Enter goes on.
   const goesOn = check.paused && !check.offered;
   const actions: (BenchAction | false)[] = [
-    goesOn && { key: 'enter', label: 'go on', run: input.onPause, disabled: busy },
+    goesOn && { key: 'enter', label: 'go on', run: input.onPause, disabled: busy, keyOnly: true },
     needs !== null &&
       !goesOn && {
         key: 'enter',

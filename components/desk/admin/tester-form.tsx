@@ -56,7 +56,7 @@ export function TesterForm({ testerId, defaults }: TesterFormProps) {
       <Fieldset legend="Plate" heading>
         <div className="grid items-start gap-4 sm:grid-cols-2">
           <TextInput label="Name on the bench" hint="Short, such as T-01." {...field('name')} />
-          <TextInput label="Serial number" {...field('serial')} />
+          <TextInput label="Serial number" hint="As on its plate." {...field('serial')} />
           <TextInput label="Maker" {...field('maker')} />
           <TextInput label="Model" {...field('model')} />
         </div>
@@ -84,7 +84,7 @@ export function TesterForm({ testerId, defaults }: TesterFormProps) {
           <NumberInput
             label="Temperature coefficient"
             optional
-            hint="Of reading, for each kelvin from the certificate’s temperature."
+            hint="Of reading, from that of the certificate."
             unit="% / K"
             {...field('temperatureCoefficientPercentPerK')}
           />

@@ -7,7 +7,7 @@ import { capital } from './rows';
 const STATE_WORDS = { open: 'Open', paused: 'Short break', closed: 'Closed' } as const;
 
 /** Every bench: who stands there, with which tester, what lies on it, and what it lacks. */
-export function BenchCards({ desk }: { desk: DeskSnapshot }) {
+export function BenchCards({ desk, slug }: { desk: DeskSnapshot; slug: string }) {
   if (desk.benches.length === 0) return <p>This meet has no bench yet.</p>;
   return (
     <ul className="grid grid-cols-[repeat(auto-fit,minmax(min(26rem,100%),1fr))] gap-4">
@@ -52,6 +52,14 @@ export function BenchCards({ desk }: { desk: DeskSnapshot }) {
                   {capital(words)}
                 </p>
               ))}
+              {bench.barred.length > 0 && (
+                <a
+                  href={bench.tester ? '/desk/testers' : `/desk/benches?meet=${slug}`}
+                  className="inline-flex min-h-12 items-center self-start underline underline-offset-4"
+                >
+                  {bench.tester ? 'See to the tester' : 'Put a tester here'}
+                </a>
+              )}
             </div>
           </li>
         );

@@ -66,7 +66,7 @@ function LiveLine({ initial, slug }: DeskLineProps) {
         <h2 id="benches" className="sr-only">
           Benches
         </h2>
-        <BenchCards desk={desk} />
+        <BenchCards desk={desk} slug={slug} />
       </section>
       <section
         aria-labelledby="line"

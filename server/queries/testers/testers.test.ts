@@ -70,7 +70,7 @@ describe('what the desk reads of testers, benches and meets', async () => {
     const after = new Date('2027-03-15T09:00:00Z');
     const tester = (await page(world.tester.id, after))!;
     expect(tester.certificates[0]).toMatchObject({ holds: false, ended: true });
-    expect(tester.barred).toContain('the tester’s certificate is out of date');
+    expect(tester.barred).toContain('the tester has no certificate that is valid today');
   });
 
   it('lists the newest thirty proofs, and says that there are more', async () => {
