@@ -36,7 +36,10 @@ export function PointResults({ check }: { check: CheckView }) {
               <Cell>
                 {point.excluded ? 'Not counted' : <VerdictMark verdict={point.verdict} />}
                 {point.reasons.map((reason) => (
-                  <span key={reason} className="text-fore-quiet block leading-snug">
+                  <span
+                    key={reason}
+                    className="text-fore-quiet block leading-snug first-letter:uppercase"
+                  >
                     {reason}
                   </span>
                 ))}
