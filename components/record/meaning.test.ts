@@ -35,6 +35,12 @@ describe('meaningOf', () => {
     }
   });
 
+  it('tells of the point that is too close to call, not of the middle one', () => {
+    const close = recordFixture({ rawNm: (nm) => (nm < 100 ? nm * 0.962 : nm * 0.99) });
+    expect(close.evaluation.verdict).toBe('too-close');
+    expect(meaningOf(close).delivers).toMatch(/^Set to 68 N·m/);
+  });
+
   it('draws nothing from a check that is not judged', () => {
     const barred = recordFixture({ facts: { barred: ['not-proved-today'] } });
     expect(meaningOf(barred).rest).toContain('no verdict is drawn');

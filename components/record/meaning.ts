@@ -25,17 +25,18 @@ export function deliversWords(record: SignedRecord, point: RecordedPoint): strin
   return point.direction === 'ccw' ? `${words}, ${directionWords('ccw')}` : words;
 }
 
-/** The set point that says most: the furthest off where something is outside, else the middle one. */
+/** The set point that says most: of those that decide it the furthest off, else the middle one. */
 function tellingPoint({ evaluation }: SignedRecord): RecordedPoint | null {
   const known = evaluation.points.filter((point) => point.meanDelivered !== null);
   const counted = known.filter((point) => !point.excluded);
   const off = (point: RecordedPoint) => Math.abs(point.summary?.mean ?? 0);
-  const outside = counted
-    .filter((point) => point.verdict === 'outside')
+  const isClear = evaluation.verdict === 'within' || evaluation.verdict === 'not-judged';
+  const deciding = counted
+    .filter((point) => !isClear && point.verdict === evaluation.verdict)
     .sort((one, other) => off(other) - off(one));
   const clockwise = counted.filter((point) => point.direction === 'cw');
   const usual = clockwise.length > 0 ? clockwise : counted.length > 0 ? counted : known;
-  return outside[0] ?? usual[Math.floor(usual.length / 2)] ?? null;
+  return deciding[0] ?? usual[Math.floor(usual.length / 2)] ?? null;
 }
 
 function allowedWords(points: readonly RecordedPoint[]): string {

@@ -13,8 +13,8 @@ export function RecordHead({ record }: { record: SignedRecord }) {
   const words = verdict === 'within' && statement !== 'Within tolerance' ? statement : undefined;
   const isSaid = words !== undefined || statement === 'Within tolerance';
   return (
-    <header className="ground-manila px-4 pt-6 pb-7 sm:px-5">
-      <div className="mx-auto flex max-w-prose flex-col gap-4">
+    <header className="ground-manila">
+      <div className="mx-auto flex max-w-prose flex-col gap-4 px-4 pt-6 pb-7 sm:px-5">
         <p className="text-fore-quiet flex flex-wrap justify-between gap-x-4">
           <span>
             {record.tagCode} · {dayWords(signedAt, meet.timeZone)},{' '}

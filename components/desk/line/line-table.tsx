@@ -187,7 +187,9 @@ function TagRow({ row, timeZone, isSelected, onSelect }: TagRowProps) {
         {tag.tool}
         <span className="text-fore-quiet block text-[0.92em]">{tag.plate}</span>
       </Cell>
-      <Cell>{tag.visitorName ?? <span className="text-fore-quiet">no name</span>}</Cell>
+      <Cell>
+        {tag.visitorName ?? <span className="text-fore-quiet whitespace-nowrap">no name</span>}
+      </Cell>
       <Cell className="whitespace-nowrap">{row.state}</Cell>
       <Cell className="whitespace-nowrap">{row.where}</Cell>
       <Cell numeric>{row.isHeld && tag.heldUntil !== null ? time(tag.heldUntil) : ''}</Cell>
