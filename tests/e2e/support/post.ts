@@ -60,10 +60,8 @@ function start(
     const ended = (code: number | null) =>
       reject(new Error(`The server ended with ${code}:\n${log}`));
     child.once('exit', ended);
-    let isOpen = false;
     const read = (chunk: Buffer) => {
       log += chunk.toString('utf8');
-      if (isOpen) return;
       const open = /"port":(\d+)[^\n]*Pullpost is open/.exec(log);
       if (!open) return;
       clearTimeout(timer);
