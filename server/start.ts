@@ -5,6 +5,7 @@ import { openStore } from '@/db/client';
 import { lanOrigin, type Env } from './env';
 import { createWebServer } from './http';
 import { bindInstruments } from './instruments/bind';
+import { watchHolds } from './jobs/holds';
 import { createHub } from './live/hub';
 import { connectProcesses } from './live/processes';
 import { createSocketServer } from './live/socket';
@@ -88,10 +89,18 @@ export async function startServer(env: Env, options: StartOptions): Promise<Runn
   if (runtime.setupCode) logger.warn(setupWords(runtime.setupCode, runtime.origin));
   logger.info({ port, origin: runtime.origin, store: store.kind }, 'Pullpost is open');
 
+  const holds = watchHolds({
+    db: store.db,
+    clock,
+    publish: hub.publish,
+    onError: (error) => logger.error({ err: error }, 'holds could not be followed'),
+  });
+
   return {
     runtime,
     port,
     async close() {
+      holds.stop();
       hub.close();
       await sockets.close();
       await web.close();

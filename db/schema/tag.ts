@@ -1,3 +1,4 @@
+import { sql } from 'drizzle-orm';
 import {
   boolean,
   doublePrecision,
@@ -84,5 +85,9 @@ export const tags = pgTable(
     // The tool that lies on a bench, or is called to it.
     index('tags_bench').on(table.benchId),
     index('tags_visitor').on(table.visitorId),
+    // Holds that run out, looked for every few seconds: few tags are ever held.
+    index('tags_held')
+      .on(table.heldUntil)
+      .where(sql`${table.heldUntil} is not null`),
   ],
 );

@@ -57,8 +57,9 @@ describe('parseNumbers', () => {
     expect(parseNumbers(text)).toEqual(numbers);
   });
 
-  it('refuses words', () => {
+  it('refuses words, and what may be one number or two', () => {
     expect(parseNumbers('45 and 110')).toBeNull();
+    expect(parseNumbers('45,110')).toBeNull();
   });
 });
 

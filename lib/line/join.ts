@@ -114,10 +114,11 @@ export type JoinInput = z.input<typeof joinSchema>;
 /**
  * Numbers typed in one field, such as '45, 110' or '45 110'. A comma with a space after it, a
  * semicolon or a space parts two numbers; a comma or a point inside one is its decimal mark.
- * Null when the text holds anything else.
+ * Null when the text holds anything else, and for '45,110', which may be one number or two.
  */
 export function parseNumbers(text: string): number[] | null {
   const words = text.split(/(?:,\s+|;|\s)+/).filter((word) => word !== '');
+  if (words.some((word) => /^\d+,\d{3}$/.test(word))) return null;
   const numbers = words.map((word) => Number(word.replace(',', '.').replace(/[,;]$/, '')));
   return numbers.every((number) => Number.isFinite(number)) ? numbers : null;
 }

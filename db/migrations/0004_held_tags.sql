@@ -1,0 +1,1 @@
+CREATE INDEX "tags_held" ON "tags" USING btree ("held_until") WHERE "tags"."held_until" is not null;
