@@ -82,7 +82,7 @@ export function Ticket(props: TicketProps) {
             className="border-line text-fore-quiet mt-6 border-t-2 border-dashed pt-5"
           >
             <p className="text-fore font-semibold">{props.tool}</p>
-            <p>{props.plate}</p>
+            <p>{props.plate.replaceAll(' %', '\u00a0%')}</p>
             <p>{props.consent}</p>
           </section>
           <OtherTags others={props.others} />

@@ -75,9 +75,6 @@ function LiveLine({ initial, slug }: DeskLineProps) {
         <h2 id="line" className="sr-only">
           The line
         </h2>
-        <p role="status" className={done === '' ? 'sr-only' : 'col-span-full font-semibold'}>
-          {done}
-        </p>
         <LineTable
           rows={rows}
           timeZone={line.timeZone}
@@ -97,6 +94,17 @@ function LiveLine({ initial, slug }: DeskLineProps) {
           />
         )}
       </section>
+      {/* In sight however far down the line the tag is that it was done to. */}
+      <p
+        role="status"
+        className={
+          done === ''
+            ? 'sr-only'
+            : 'bg-band border-fore sticky bottom-0 z-10 border-l-6 px-4 py-3 text-lg font-semibold'
+        }
+      >
+        {done}
+      </p>
     </DeskPage>
   );
 }
