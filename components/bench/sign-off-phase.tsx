@@ -9,6 +9,7 @@ import { VerdictHeading } from '../verdict/verdict-mark';
 import { useBench } from './bench-context';
 import { BenchFrame, TwoColumns } from './bench-frame';
 import type { BenchAction } from './keys';
+import { missingWords } from './missing-words';
 import { PointResults } from './point-results';
 import { ProblemNotice } from './problem-notice';
 import { CheckPanels, type CheckPanel } from './pull/check-panels';
@@ -49,7 +50,7 @@ export function SignOffPhase({ check, tag }: { check: CheckView; tag: TagView })
               </div>
               <p className="text-fore-quiet">{check.planName}</p>
               {check.stoppedEarly && <p className="text-lg font-bold">Stopped early.</p>}
-              <Words title="Missing" lines={check.missing} />
+              <Words title="Missing" lines={missingWords(check.missing)} />
               <Words title="Not followed" lines={check.notFollowed} />
               <Words title="Notes" lines={check.notes.map(({ text }) => text)} />
             </div>
