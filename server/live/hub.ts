@@ -45,7 +45,11 @@ export function createHub(options: HubOptions): LiveHub {
   const { db, clock, secret, logger, instruments, shared } = options;
   let io: LiveServer | null = null;
   const listeners: ((event: LiveEvent) => void)[] = [];
-  const onError = (error: unknown) => logger.error({ err: error }, 'a live snapshot failed');
+  let closed = false;
+  const onError = (error: unknown) => {
+    // A read that was under way when the store was closed concerns nobody.
+    if (!closed) logger.error({ err: error }, 'a live snapshot failed');
+  };
 
   const inTurn = shared ? atOnce : createTurns();
   // Who is connected to another process is not known here.
@@ -160,6 +164,7 @@ export function createHub(options: HubOptions): LiveHub {
       listeners.push(listener);
     },
     close() {
+      closed = true;
       line.close();
       for (const throttle of [desk, bench, ticket]) throttle.close();
       io = null;

@@ -30,8 +30,9 @@ const CHECK = `
   where c.id = $1 for update of c`;
 
 const PULLS = `
-  select p.*, d.* from pulls p left join pull_decisions d on d.pull_id = p.id
-  where p.check_id = $1 order by p.sequence`;
+  select p.*, d.* from pulls p
+  left join pull_decisions d on d.pull_id = p.id and d.check_id = $1
+  where p.check_id = $2 order by p.sequence`;
 
 const NOTES = 'select text, at from check_notes where check_id = $1 order by at desc';
 
@@ -40,8 +41,8 @@ const INSERT_PULL = `
   values ($1, $2, $3, $4, $5, $6, $7, $8, $9, $10)`;
 
 const INSERT_DECISION = `
-  insert into pull_decisions (id, pull_id, check_id, decision, tool_value, fault, note, at, by_staff_id)
-  values ($1, $2, $3, $4, $5, $6, $7, $8, $9)`;
+  insert into pull_decisions (id, pull_id, check_id, decision, outcome, tool_value, fault, note, at, by_staff_id)
+  values ($1, $2, $3, $4, $5, $6, $7, $8, $9, $10)`;
 
 const INSERT_LEDGER = `
   insert into ledger (sequence, at, actor, command, meet_id, subject_id, detail)
@@ -63,7 +64,7 @@ export function pullByHand(client: PGlite, { staffId, commandId, input, now }: H
     await rows(STAFF, [staffId]);
     await rows(EARLIER, [actor, 'pull.record', commandId]);
     const [check] = await rows(CHECK, [checkId]);
-    const taken = await rows(PULLS, [checkId]);
+    const taken = await rows(PULLS, [checkId, checkId]);
     await rows(NOTES, [checkId]);
 
     // Columns of `checks` stand first, in the order of the table.
@@ -78,7 +79,7 @@ export function pullByHand(client: PGlite, { staffId, commandId, input, now }: H
       ...[input.value, 0, 'keyed', at, staffId],
     ]);
     await rows(INSERT_DECISION, [
-      ...[uuidv7(), pullId, checkId, 'accepted', target, null, null, at, staffId],
+      ...[uuidv7(), pullId, checkId, 'accepted', null, target, null, null, at, staffId],
     ]);
     const detail = { tagId, code: 'A01', pullId, step: stepIndex, accepted: true };
     await rows(INSERT_LEDGER, [
