@@ -28,9 +28,7 @@ export function Cautions(props: CautionsProps) {
       <li>Pull on the grip’s middle, square to the handle, towards yourself.</li>
       <li>
         Stand firm, feet apart:{' '}
-        {props.mode === 'live'
-          ? 'the drive can slip off all at once.'
-          : 'the tool lets go all at once.'}
+        {props.mode === 'live' ? 'the drive can slip off.' : 'the tool lets go all at once.'}
       </li>
       <li>Eye protection on, yours and the visitor’s.</li>
       <li>Nobody stands in the arc of the handle.</li>
