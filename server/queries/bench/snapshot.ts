@@ -47,7 +47,7 @@ async function testerOf(scope: BenchScope, testerId: string, meet: typeof meets.
     proof: proofWords(today.proof, meet.timeZone),
     barred: today.barred.map((code) =>
       code === 'tester-locked'
-        ? `${reasonWords(code)} ${today.tester.lockedReason}`
+        ? `${reasonWords(code)}: ${today.tester.lockedReason}`
         : reasonWords(code),
     ),
     instrument: {
