@@ -9,6 +9,8 @@ export default defineConfig({
   timeout: 120_000,
   expect: { timeout: 15_000 },
   forbidOnly: true,
+  // A shared machine can stall for seconds; a test that fails twice has failed.
+  retries: process.env.CI ? 1 : 0,
   use: {
     browserName: 'chromium',
     actionTimeout: 20_000,
