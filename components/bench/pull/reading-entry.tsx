@@ -68,7 +68,7 @@ export function ReadingEntry(props: ReadingEntryProps) {
           label={`Tool’s display, ${check.unitLabel}`}
           field={field}
           value={entry.text.toolValue}
-          readOnly={entry.unanswered}
+          readOnly={entry.unanswered || entry.pending}
           invalid={entry.errors.toolValue !== undefined}
           onType={(typed) => entry.type('toolValue', typed)}
           onKeyDown={(event) => {
@@ -86,7 +86,7 @@ export function ReadingEntry(props: ReadingEntryProps) {
           aside={<UnitChoice unit={unit} onUnit={onUnit} />}
           field={needs.toolValue ? undefined : field}
           value={entry.text.value}
-          readOnly={entry.unanswered}
+          readOnly={entry.unanswered || entry.pending}
           invalid={entry.errors.value !== undefined}
           onType={(typed) => entry.type('value', typed)}
         />
