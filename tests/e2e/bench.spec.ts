@@ -4,6 +4,7 @@ import { expect, test } from './support/fixtures';
 const OPERATOR = { staffId: STAFF_IDS.operator, sessionVersion: 1 };
 const LEAD = { staffId: STAFF_IDS.lead, sessionVersion: 1 };
 
+test.use({ apart: 'bench' });
 test.describe.configure({ mode: 'serial' });
 
 test('a check that is half done is finished by touch alone, on a simulated tester', async ({

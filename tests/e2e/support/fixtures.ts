@@ -98,8 +98,13 @@ async function windowsOn(
 }
 
 /** Tests on one rehearsal, seeded once for the file. */
-export const test = base.extend<{ windows: Windows }, { post: RunningPost; flags: string[] }>({
+export const test = base.extend<
+  { windows: Windows },
+  { post: RunningPost; flags: string[]; apart: string }
+>({
   flags: [['--rehearsal'], { option: true, scope: 'worker' }],
+  // A file that must find the story as it was seeded names itself here, and gets a post of its own.
+  apart: ['', { option: true, scope: 'worker' }],
   post: [
     async ({ flags }, use) => {
       const post = await startPost({ flags });
